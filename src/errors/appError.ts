@@ -1,13 +1,6 @@
 /** What can go wrong on purpose, each with one HTTP status (see `src/http/problem.ts`). */
 export type AppErrorCode =
-  | 'unauthenticated'
-  | 'forbidden'
-  | 'not-found'
-  | 'conflict'
-  | 'invalid'
-  | 'too-large'
-  | 'too-many'
-  | 'unavailable';
+  'unauthenticated' | 'forbidden' | 'not-found' | 'conflict' | 'invalid' | 'too-large' | 'too-many' | 'unavailable';
 
 export interface FieldError {
   path: string;

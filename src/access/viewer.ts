@@ -1,0 +1,26 @@
+/** The five roles. Each is a set of permissions; none stands above another. */
+export const ROLES = ['director', 'strength_coach', 'swing_coach', 'guardian', 'athlete'] as const;
+export type Role = (typeof ROLES)[number];
+
+/** What people are called on screen. */
+export const ROLE_NAMES: Readonly<Record<Role, string>> = {
+  director: 'director',
+  strength_coach: 'strength coach',
+  swing_coach: 'swing coach',
+  guardian: 'parent',
+  athlete: 'athlete',
+};
+
+/** A signed-in person acting as one role in one academy. */
+export interface Viewer {
+  personId: string;
+  academyId: string;
+  role: Role;
+  sessionId: string;
+  membershipId: string;
+  name: string;
+  academyName: string;
+  timeZone: string;
+}
+
+export const isStaff = ({ role }: Pick<Viewer, 'role'>): boolean => role !== 'guardian' && role !== 'athlete';

@@ -1,0 +1,70 @@
+import { Kysely, PostgresDialect, sql, type Transaction } from 'kysely';
+import pg from 'pg';
+import type { Viewer } from '#src/access/viewer.ts';
+import type { DB } from '#src/db/types.ts';
+
+/** A transaction in which the viewer is set: what every query on personal data takes. */
+export type Tx = Transaction<DB>;
+
+// A date is a day on a calendar, not a moment: it stays text from the database to the page.
+pg.types.setTypeParser(1082, String);
+pg.types.setTypeParser(20, Number);
+pg.types.setTypeParser(1700, Number);
+
+const opened = new Map<string, Kysely<DB>>();
+
+function open(name: string, max: number): Kysely<DB> {
+  const known = opened.get(name);
+  if (known) return known;
+  const connectionString = process.env[name];
+  if (!connectionString) throw new Error(`${name} is not set`);
+  const pool = new pg.Pool({ connectionString, max, connectionTimeoutMillis: 4_000, idleTimeoutMillis: 30_000 });
+  // Without a listener, a backend that the server ends takes the process with it.
+  pool.on('error', () => undefined);
+  const db = new Kysely<DB>({ dialect: new PostgresDialect({ pool }) });
+  opened.set(name, db);
+  return db;
+}
+
+/** The application's connections: a role that owns nothing and cannot pass row security. */
+export const appDb = () => open('DATABASE_URL', 10);
+
+/** Sign-in and sessions, which happen before there is a viewer. */
+export const authDb = () => open('DATABASE_AUTH_URL', 6);
+
+/** Jobs, one academy at a time. */
+export const jobDb = () => open('DATABASE_JOB_URL', 3);
+
+/** Set-up of a new academy and the demo, from the command line only. */
+export const ownerDb = () => open('DATABASE_OWNER_URL', 2);
+
+/** Closes every pool that this process opened. */
+export async function closeDatabases(): Promise<void> {
+  await Promise.all([...opened.values()].map((db) => db.destroy()));
+  opened.clear();
+}
+
+/**
+ * The one door to personal data: opens a transaction, tells the database who is looking (for this transaction only),
+ * and hands it to the work. Anything thrown rolls all of it back.
+ */
+export function asViewer<T>(viewer: Viewer, work: (trx: Tx) => Promise<T>): Promise<T> {
+  return appDb()
+    .transaction()
+    .execute(async (trx) => {
+      await sql`select set_config('app.academy', ${viewer.academyId}, true),
+                       set_config('app.person', ${viewer.personId}, true),
+                       set_config('app.role', ${viewer.role}, true)`.execute(trx);
+      return work(trx);
+    });
+}
+
+/** The same door for a job: rows of one academy, whoever they belong to. */
+export function asJob<T>(academyId: string, work: (trx: Tx) => Promise<T>): Promise<T> {
+  return jobDb()
+    .transaction()
+    .execute(async (trx) => {
+      await sql`select set_config('app.academy', ${academyId}, true)`.execute(trx);
+      return work(trx);
+    });
+}
