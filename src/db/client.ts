@@ -11,9 +11,13 @@ pg.types.setTypeParser(1082, String);
 pg.types.setTypeParser(20, Number);
 pg.types.setTypeParser(1700, Number);
 
-const opened = new Map<string, Kysely<DB>>();
+interface Opened {
+  db: Kysely<DB>;
+  pool: pg.Pool;
+}
+const opened = new Map<string, Opened>();
 
-function open(name: string, max: number): Kysely<DB> {
+function open(name: string, max: number): Opened {
   const known = opened.get(name);
   if (known) return known;
   const connectionString = process.env[name];
@@ -21,26 +25,29 @@ function open(name: string, max: number): Kysely<DB> {
   const pool = new pg.Pool({ connectionString, max, connectionTimeoutMillis: 4_000, idleTimeoutMillis: 30_000 });
   // Without a listener, a backend that the server ends takes the process with it.
   pool.on('error', () => undefined);
-  const db = new Kysely<DB>({ dialect: new PostgresDialect({ pool }) });
-  opened.set(name, db);
-  return db;
+  const connection = { db: new Kysely<DB>({ dialect: new PostgresDialect({ pool }) }), pool };
+  opened.set(name, connection);
+  return connection;
 }
 
 /** The application's connections: a role that owns nothing and cannot pass row security. */
-export const appDb = () => open('DATABASE_URL', 10);
+export const appDb = () => open('DATABASE_URL', 10).db;
 
 /** Sign-in and sessions, which happen before there is a viewer. */
-export const authDb = () => open('DATABASE_AUTH_URL', 6);
+export const authDb = () => open('DATABASE_AUTH_URL', 6).db;
+
+/** The same connections as a plain pool, for the limiter, which brings its own statements. */
+export const authPool = () => open('DATABASE_AUTH_URL', 6).pool;
 
 /** Jobs, one academy at a time. */
-export const jobDb = () => open('DATABASE_JOB_URL', 3);
+export const jobDb = () => open('DATABASE_JOB_URL', 3).db;
 
 /** Set-up of a new academy and the demo, from the command line only. */
-export const ownerDb = () => open('DATABASE_OWNER_URL', 2);
+export const ownerDb = () => open('DATABASE_OWNER_URL', 2).db;
 
 /** Closes every pool that this process opened. */
 export async function closeDatabases(): Promise<void> {
-  await Promise.all([...opened.values()].map((db) => db.destroy()));
+  await Promise.all([...opened.values()].map(({ db }) => db.destroy()));
   opened.clear();
 }
 

@@ -2,7 +2,7 @@ import type { APIContext, APIRoute } from 'astro';
 import type { Viewer } from '#src/access/viewer.ts';
 import { AppError } from '#src/errors/appError.ts';
 import { problemOf } from '#src/http/problem.ts';
-import { reportError } from '#src/http/reportError.ts';
+import { reportError } from '#src/errors/reportError.ts';
 
 /**
  * A route for a signed-in person. Whether the role may come here has been asked already, from the route registry;
