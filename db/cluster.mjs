@@ -33,7 +33,7 @@ const usualPort = 54329;
  * @param {boolean} [options.durable] false for test data only: faster, and lost in a crash
  * @param {number[]} [options.ports] ports to try before any free one
  * @param {(line: string) => void} [options.log] is told, in plain words, what is done
- * @returns {Promise<{host: string, port: number, pid: number, dataDir: string, superuserUrl: string, secrets: {superuser: string, authSecret: string, roles: Record<string, string>}, started: boolean, stop: () => Promise<void>}>}
+ * @returns {Promise<{host: string, port: number, pid: number, dataDir: string, binaries: string, superuserUrl: string, secrets: {superuser: string, authSecret: string, roles: Record<string, string>}, started: boolean, stop: () => Promise<void>}>}
  *   `stop` leaves the cluster, and shuts it down when nobody else uses it
  */
 export async function ensureCluster({
@@ -99,7 +99,7 @@ export async function ensureCluster({
         if (!leave(users)) await stopPostmaster(dataDir);
       });
     const superuserUrl = `postgres://postgres:${secrets.superuser}@${host}:${port}/postgres`;
-    return { host, port, pid, dataDir, superuserUrl, secrets, started, stop };
+    return { host, port, pid, dataDir, binaries: context.binaries, superuserUrl, secrets, started, stop };
   });
 }
 
