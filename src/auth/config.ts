@@ -1,7 +1,7 @@
 import { skipCSRFCheck } from '@auth/core';
 import { CredentialsSignin } from '@auth/core/errors';
 import Credentials from '@auth/core/providers/credentials';
-import { defineConfig } from 'auth-astro';
+import type { AuthConfig } from '@auth/core/types';
 import { cookies, SESSION_MAX_AGE_S } from '#src/auth/cookies.ts';
 import { signIn, signOut, startSession } from '#src/auth/signIn.ts';
 import { safePath } from '#src/http/safePath.ts';
@@ -14,7 +14,10 @@ class Refused extends CredentialsSignin {
   }
 }
 
-export default defineConfig({
+// What the integration's own `defineConfig` adds is the prefix; its package ships sources that our settings would check.
+const config: Omit<AuthConfig, 'raw'> & { prefix: string } = {
+  prefix: '/api/auth',
+  basePath: '/api/auth',
   secret: process.env['AUTH_SECRET'],
   trustHost: true,
   // Our own server asks every unsafe request for its exact Origin, so the form needs no second token.
@@ -55,7 +58,9 @@ export default defineConfig({
       if ('token' in message && typeof message.token?.['sid'] === 'string') await signOut(message.token['sid']);
     },
   },
-});
+};
+
+export default config;
 
 // The library comes back to the sign-in page with its own error; that one path may pass.
 const pathOrSignIn = (path: string): string => (path.startsWith('/sign-in?') ? path : safePath(path));

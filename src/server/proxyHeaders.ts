@@ -20,7 +20,10 @@ export function cleanForwarding(
   for (const name of Object.keys(headers)) {
     if (name.startsWith('x-forwarded-') || name === 'forwarded' || name === 'x-real-ip') delete headers[name];
   }
-  if (address && /^[0-9a-f.:]{2,45}$/i.test(address)) headers['x-forwarded-for'] = address;
+  const forwarded = address && /^[0-9a-f.:]{2,45}$/i.test(address) ? address : undefined;
+  if (forwarded) headers['x-forwarded-for'] = forwarded;
+  // What the limits count by: ours alone, whatever a stranger sent under this name.
+  headers['x-marram-client'] = forwarded ?? peer;
   if (https && trusted.has(peer)) headers['x-forwarded-proto'] = 'https';
 }
 
