@@ -57,7 +57,8 @@ export async function migrate({ superuserUrl, database, rolePasswords }: Migrate
     await withClient(urlOf(superuserUrl, { database }), async (inside) => {
       await inside.query(`
         grant select on all tables in schema public to marram_backup;
-        grant select on all sequences in schema public to marram_backup`);
+        grant select on all sequences in schema public to marram_backup;
+        grant select on kysely_migration to marram_app`);
     });
   });
 }

@@ -49,7 +49,7 @@ export function createApp({ settings, log, pages, clientFolder, ready }: AppPart
   app.use(originGuard(settings.origins));
   app.use(bodyCap);
   app.get('/healthz', healthz);
-  app.get('/readyz', readyz(ready));
+  app.get('/readyz', readyz(ready, log));
   app.use(compressed());
   if (clientFolder) app.use(staticFiles(clientFolder));
   app.use((req, res) => pages(req, res, undefined, { requestId: res.locals['requestId'] }));

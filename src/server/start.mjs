@@ -124,7 +124,9 @@ async function stop(exitCode) {
   if (stopping) return;
   stopping = true;
   abort.abort();
-  process.stderr.write('- Stopping\n');
+  if (cluster) process.stderr.write('- Stopping\n');
+  // A step in the middle ends first: what it started, we stop.
+  await Promise.race([starting, new Promise((resolve) => setTimeout(resolve, 20_000).unref())]);
   await Promise.all([...children].map((child) => stopChild(child)));
   await cluster?.stop().catch((error) => say(error.message));
   process.exit(exitCode);
@@ -137,4 +139,4 @@ function fail(error) {
 }
 
 onStop(stop);
-start().catch(fail);
+const starting = start().catch(fail);
