@@ -3,7 +3,7 @@ import { existsSync, readFileSync, readdirSync, writeFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
 import { madeFolder, projectRoot, stateFolder } from '#db/cluster/paths.mjs';
 import { withLock } from '#db/cluster/withLock.mjs';
-import { plainEnvironment, runQuietly } from './child.mjs';
+import { plainEnvironment, runQuietly, testTraces } from './child.mjs';
 import { compressFolder } from './compressFolder.mjs';
 
 const sources = ['src', 'emails', 'public', 'db', 'astro.config.mjs', 'tsconfig.json', 'package-lock.json'];
@@ -60,6 +60,9 @@ export function isBuilt() {
 /**
  * Builds when the sources have changed. No secret and no trace of a test run goes into the build: variables found in the
  * environment are otherwise written into it, and one made inside a test run cannot draw its pages.
+ *
+ * @param {{ signal?: AbortSignal, force?: boolean }} [options]
+ * @returns {Promise<boolean>} whether it was built now
  */
 export async function ensureBuild({ signal, force = false } = {}) {
   if (!force && isBuilt()) return false;
@@ -67,17 +70,7 @@ export async function ensureBuild({ signal, force = false } = {}) {
     if (!force && isBuilt()) return false;
     const hash = sourceHash();
     const secrets = Object.keys(process.env).filter((name) => /^(DATABASE_|AUTH_|MARRAM_)/.test(name));
-    const env = plainEnvironment([
-      'VITEST',
-      'VITEST_MODE',
-      'TEST',
-      'MODE',
-      'DEV',
-      'PROD',
-      'SSR',
-      'BASE_URL',
-      ...secrets,
-    ]);
+    const env = plainEnvironment([...testTraces, ...secrets]);
     const astro = join(projectRoot, 'node_modules', 'astro', 'astro.js');
     await runQuietly(process.execPath, [astro, 'build'], { env: { ...env, NODE_ENV: 'production' }, signal });
     await compressFolder(join(projectRoot, 'dist', 'client'));

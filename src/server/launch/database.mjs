@@ -10,7 +10,16 @@ import { say } from './progress.mjs';
 /** Where the seed writes the demo's accounts: `[{ role, email, password }]`. */
 export const demoAccountsFile = join(stateFolder, 'demo-accounts.json');
 
-/** Brings the database to the newest migration and, in a demo, fills it when it is empty. */
+/**
+ * Brings the database to the newest migration and, in a demo, fills it when it is empty.
+ *
+ * @param {object} options
+ * @param {Awaited<ReturnType<typeof import('#db/cluster.mjs').ensureCluster>>} options.cluster
+ * @param {string} [options.database]
+ * @param {boolean} options.seed whether this is a demo
+ * @param {string} [options.accountsFile] where the seed leaves the demo's accounts
+ * @param {AbortSignal} [options.signal]
+ */
 export async function prepareDatabase({ cluster, database = 'marram', seed, accountsFile = demoAccountsFile, signal }) {
   await withLock(stateFolder, `database-${database}`, async () => {
     await runScript('db/migrate.ts', { env: migrationEnvironment({ cluster, database }), signal });

@@ -25,7 +25,11 @@ function packagesOf(path) {
   }
 }
 
-/** Installs the npm packages when they are not the lockfile's. */
+/**
+ * Installs the npm packages when they are not the lockfile's.
+ *
+ * @param {{ signal?: AbortSignal }} [options]
+ */
 export async function ensurePackages({ signal } = {}) {
   if (arePackagesInstalled()) return;
   await withLock(madeFolder(stateFolder), 'packages', async () => {

@@ -2,16 +2,17 @@ import { spawn } from 'node:child_process';
 import { closeSync, existsSync, openSync, renameSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import { projectRoot, stateFolder } from '#db/cluster/paths.mjs';
+import { plainEnvironment, testTraces } from './child.mjs';
 
 export const serverLog = join(stateFolder, 'server.log');
 
 /** Starts the web server as a child in our process group, its log in a file; the channel tells it when we are gone. */
-export function spawnServer(env) {
-  if (existsSync(serverLog) && statSync(serverLog).size > 20_000_000) renameSync(serverLog, `${serverLog}.1`);
-  const output = openSync(serverLog, 'a', 0o600);
+export function spawnServer(env, logFile = serverLog) {
+  if (existsSync(logFile) && statSync(logFile).size > 20_000_000) renameSync(logFile, `${logFile}.1`);
+  const output = openSync(logFile, 'a', 0o600);
   const child = spawn(process.execPath, ['--import', 'tsx', 'src/server/main.ts'], {
     cwd: projectRoot,
-    env: { ...process.env, ...env, NODE_ENV: 'production' },
+    env: { ...plainEnvironment(testTraces), ...env, NODE_ENV: 'production' },
     stdio: ['ignore', output, output, 'ipc'],
   });
   closeSync(output);
