@@ -1,5 +1,7 @@
 import type { listGrowthMeasures } from '#src/db/queries/growthMeasures.ts';
 import { growthCaution } from '#src/domain/care/growthCaution.ts';
+import { ageMonths } from '#src/domain/growth/ageMonths.ts';
+import { growthCentile } from '#src/domain/growth/growthCentile.ts';
 import { growthVelocity, type GrowthVelocityResult } from '#src/domain/growth/growthVelocity.ts';
 import { ageYears } from '#src/domain/growth/ageYears.ts';
 import { maturity, type MaturityResult } from '#src/domain/growth/maturity.ts';
@@ -66,4 +68,22 @@ export function massNear(rows: readonly GrowthRow[], on: string, withinDays: num
     .filter(({ massKg, measuredOn }) => massKg !== null && Math.abs(dayNumber(measuredOn) - day) <= withinDays)
     .sort((a, b) => Math.abs(dayNumber(a.measuredOn) - day) - Math.abs(dayNumber(b.measuredOn) - day));
   return near[0]?.massKg ?? null;
+}
+
+/** Measures with the age that day and the centile of stature and of mass in the CDC 2000 reference. */
+export function centilesOf(
+  rows: readonly GrowthRow[],
+  { sex, birthDate }: { sex: 'female' | 'male'; birthDate: string },
+) {
+  return rows.map((row) => {
+    const months = ageMonths(birthDate, row.measuredOn);
+    const centile = (measure: 'stature' | 'weight', value: number | null) =>
+      value === null ? null : growthCentile({ measure, sex, ageMonths: months, value }).centile;
+    return {
+      ...row,
+      age: months / 12,
+      statureCentile: centile('stature', row.statureM === null ? null : row.statureM * 100),
+      massCentile: centile('weight', row.massKg),
+    };
+  });
 }
