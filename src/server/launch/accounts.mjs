@@ -1,6 +1,11 @@
 import { existsSync, readFileSync } from 'node:fs';
 
-/** One demo account a role as lines to print; none outside the demo. */
+/**
+ * One demo account a role as lines to print; none outside the demo.
+ *
+ * @param {string} file where the seed left them
+ * @returns {string[]}
+ */
 export function accountLines(file) {
   if (!existsSync(file)) return [];
   const seen = new Set();
