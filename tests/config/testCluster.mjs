@@ -15,7 +15,7 @@ export function templateName() {
   const db = join(projectRoot, 'db');
   const files = readdirSync(db, { withFileTypes: true, recursive: true })
     .filter((entry) => entry.isFile() && entry.name.endsWith('.ts'))
-    .map((entry) => join(entry.parentPath ?? entry.path, entry.name))
+    .map((entry) => join(entry.parentPath, entry.name))
     .filter((path) => !path.startsWith(join(db, 'seed')))
     .sort();
   for (const file of files) hash.update(file.slice(db.length)).update(readFileSync(file));

@@ -9,7 +9,7 @@ const compressible = /\.(js|css|svg|json|txt|webmanifest)$/;
 export async function compressFolder(folder) {
   for (const entry of await readdir(folder, { withFileTypes: true, recursive: true })) {
     if (!entry.isFile() || !compressible.test(entry.name)) continue;
-    const path = join(entry.parentPath ?? entry.path, entry.name);
+    const path = join(entry.parentPath, entry.name);
     const content = await readFile(path);
     if (content.length < 1024) continue;
     await writeFile(`${path}.br`, await promisify(brotliCompress)(content));
