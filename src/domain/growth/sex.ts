@@ -1,0 +1,2 @@
+/** The two sexes for which growth references are published. */
+export type Sex = 'male' | 'female';
