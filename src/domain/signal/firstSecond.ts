@@ -1,0 +1,23 @@
+import { mean } from '#src/domain/statistics/mean.ts';
+import { sampleStandardDeviation } from '#src/domain/statistics/sampleStandardDeviation.ts';
+
+/** The first second of a force curve: its length in samples, mean and sample standard deviation in N. */
+export interface FirstSecond {
+  samples: number;
+  meanN: number;
+  sdN: number;
+}
+
+/**
+ * Mean and spread of the first second of a force curve.
+ *
+ * @param force      N, finite
+ * @param sampleRate samples per second
+ * @returns null where the curve is shorter than one second or the second has fewer than two samples
+ */
+export function firstSecond(force: ArrayLike<number>, sampleRate: number): FirstSecond | null {
+  const samples = Math.floor(sampleRate);
+  if (samples < 2 || force.length < samples) return null;
+  const second = Float64Array.from({ length: samples }, (_, i) => force[i]!);
+  return { samples, meanN: mean(second), sdN: sampleStandardDeviation(second) };
+}
