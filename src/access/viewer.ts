@@ -21,6 +21,17 @@ export interface Viewer {
   name: string;
   academyName: string;
   timeZone: string;
+  /** Whom to tell of a worry about a child, as the academy words it. */
+  safeguarding: string;
+  /** The person's own (academy, role) pairs, this one among them. */
+  memberships: readonly Membership[];
+}
+
+/** One (academy, role) that a person may act as. */
+export interface Membership {
+  membershipId: string;
+  academyName: string;
+  role: Role;
 }
 
 export const isStaff = ({ role }: Pick<Viewer, 'role'>): boolean => role !== 'guardian' && role !== 'athlete';

@@ -1,5 +1,6 @@
 import { sql, type Kysely } from 'kysely';
-import type { Role } from '#src/access/viewer.ts';
+import { jsonArrayFrom } from 'kysely/helpers/postgres';
+import type { Membership, Role } from '#src/access/viewer.ts';
 import type { DB } from '#src/db/types.ts';
 
 /** Person and password hash behind a sign-in name (e-mail or user name), if both exist and the person is active. */
@@ -62,6 +63,8 @@ export interface LiveSession {
   timeZone: string;
   role: Role;
   name: string;
+  safeguarding: string;
+  memberships: Membership[];
   lastSeenAt: Date;
 }
 
@@ -72,7 +75,7 @@ export function findLiveSession(db: Kysely<DB>, tokenHash: Buffer): Promise<Live
     .innerJoin('membership', 'membership.id', 'session.membership_id')
     .innerJoin('person', 'person.id', 'session.person_id')
     .innerJoin('academy', 'academy.id', 'membership.academy_id')
-    .select([
+    .select((eb) => [
       'session.id as sessionId',
       'membership.id as membershipId',
       'person.id as personId',
@@ -80,6 +83,17 @@ export function findLiveSession(db: Kysely<DB>, tokenHash: Buffer): Promise<Live
       'academy.name as academyName',
       'academy.time_zone as timeZone',
       'membership.role',
+      'academy.safeguarding_contact as safeguarding',
+      jsonArrayFrom(
+        eb
+          .selectFrom('membership as own')
+          .innerJoin('academy as ownAcademy', 'ownAcademy.id', 'own.academy_id')
+          .select(['own.id as membershipId', 'ownAcademy.name as academyName', 'own.role'])
+          .whereRef('own.person_id', '=', 'session.person_id')
+          .where('own.ended_at', 'is', null)
+          .orderBy('ownAcademy.name')
+          .orderBy('own.role'),
+      ).as('memberships'),
       'session.last_seen_at as lastSeenAt',
       sql<string>`person.given_name || ' ' || person.family_name`.as('name'),
     ])
