@@ -58,7 +58,12 @@ async function startServer(port, ends = []) {
 
 /** The development server of Astro, and the job queue beside it; the page's own errors are shown here. */
 async function startDev(port) {
-  const env = { ...process.env, ...serverEnvironment({ cluster, port }), ASTRO_TELEMETRY_DISABLED: '1' };
+  const env = {
+    ...process.env,
+    ...serverEnvironment({ cluster, port }),
+    ASTRO_TELEMETRY_DISABLED: '1',
+    ASTRO_DISABLE_UPDATE_CHECK: 'true',
+  };
   const astro = [
     join(projectRoot, 'node_modules/astro/astro.js'),
     'dev',
