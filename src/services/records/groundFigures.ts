@@ -38,8 +38,8 @@ export interface GroundSession {
   rig: string | null;
   measure: string;
   swings: GroundSwing[];
-  /** Mean lead share of the swings at each event, % of both feet. */
-  meanShare: { event: SwingEvent; pct: number }[];
+  /** Mean lead share of the swings at each event (% of both feet) and its mean time from takeaway (s). */
+  meanShare: { event: SwingEvent; pct: number; timeS: number }[];
 }
 
 const MASS_WITHIN_DAYS = 31;
@@ -56,7 +56,7 @@ export function groundSessions(
     const own = rows.filter(({ recordedOn, club }) => `${recordedOn} ${club}` === key);
     const { recordedOn, club, rig, measure } = own[0]!;
     const swings = own.map((row) => swingOf(row, leadSide, massNear(growth, recordedOn, MASS_WITHIN_DAYS)));
-    return { recordedOn, club, rig, measure, swings, meanShare: meanShares(swings) };
+    return { recordedOn, club, rig, measure, swings, meanShare: meanShares(swings, own) };
   });
 }
 
@@ -78,9 +78,11 @@ function swingOf(row: GroundTraceRow, leadSide: Side, massKg: number | null): Gr
   };
 }
 
-function meanShares(swings: readonly GroundSwing[]): GroundSession['meanShare'] {
+function meanShares(swings: readonly GroundSwing[], rows: readonly GroundTraceRow[]): GroundSession['meanShare'] {
+  const times = rows.map(({ events }) => events as Partial<Record<SwingEvent, number>>);
   return (Object.keys(SWING_EVENT_NAMES) as SwingEvent[]).flatMap((event) => {
     const values = swings.flatMap(({ sharePctAt }) => sharePctAt[event] ?? []);
-    return values.length === 0 ? [] : [{ event, pct: mean(values) }];
+    const after = times.flatMap((known) => (known[event] === undefined ? [] : known[event] - (known.takeaway ?? 0)));
+    return values.length === 0 || after.length === 0 ? [] : [{ event, pct: mean(values), timeS: mean(after) }];
   });
 }
