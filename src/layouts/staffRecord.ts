@@ -1,4 +1,4 @@
-import { careItems } from '#src/layouts/careItems.ts';
+import { careItems } from '#src/components/marks/careItems.ts';
 import { recordSections, type RecordHead } from '#src/layouts/recordHead.ts';
 import { plainNumber } from '#src/ui/words/numberWords.ts';
 import type { RecordHeader } from '#src/services/records/loadHeader.ts';
