@@ -1,31 +1,5 @@
-import { readFileSync, rmSync } from 'node:fs';
-import { join } from 'node:path';
-import pg from 'pg';
 import type { TestProject } from 'vitest/node';
-import { freePort } from '#db/cluster/freePort.mjs';
-import { stateFolder } from '#db/cluster/paths.mjs';
-import { environmentOf, serverEnvironment } from '#src/server/environment.mjs';
-import { ensureBuild } from '#src/server/launch/build.mjs';
-import { prepareDatabase } from '#src/server/launch/database.mjs';
-import { answers, spawnServer, stopChild } from '#src/server/launch/server.mjs';
-import { ensureTestCluster } from '#tests/config/testCluster.mjs';
-
-export interface DemoAccount {
-  role: string;
-  email: string;
-  password: string;
-}
-
-/** The running product that an end-to-end test talks to. */
-export interface RunningProduct {
-  baseUrl: string;
-  accounts: DemoAccount[];
-  /** The addresses of its database by role, as the application reads them. */
-  env: Record<string, string>;
-  superuserUrl: string;
-  /** Its log: one JSON object a line. */
-  logFile: string;
-}
+import { startProduct, type RunningProduct } from '#tests/config/product.ts';
 
 declare module 'vitest' {
   interface ProvidedContext {
@@ -33,43 +7,9 @@ declare module 'vitest' {
   }
 }
 
-/** Starts the built product on a free port with a database of its own, filled with the demo. */
+/** One running product for all end-to-end tests. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
-  await ensureBuild();
-  const cluster = await ensureTestCluster();
-  const database = `test_${process.pid}_e2e`;
-  const accountsFile = join(stateFolder, `accounts-${database}.json`);
-  const logFile = join(stateFolder, 'e2e-server.log');
-  rmSync(logFile, { force: true });
-  await prepareDatabase({ cluster, database, seed: true, accountsFile });
-  const accounts = JSON.parse(readFileSync(accountsFile, 'utf8')) as DemoAccount[];
-  rmSync(accountsFile);
-
-  const port = await freePort();
-  const baseUrl = `http://127.0.0.1:${port}`;
-  const child = spawnServer({ ...serverEnvironment({ cluster, database, port }), PUBLIC_URL: baseUrl }, logFile);
-  if (!(await answers(`${baseUrl}/readyz`, child, 60_000))) {
-    await stopChild(child);
-    throw new Error(`The server did not get ready. Its log: ${logFile}`);
-  }
-  const superuserUrl = new URL(cluster.superuserUrl);
-  superuserUrl.pathname = `/${database}`;
-  project.provide('product', {
-    baseUrl,
-    accounts,
-    env: environmentOf({ cluster, database, port }),
-    superuserUrl: superuserUrl.toString(),
-    logFile,
-  });
-  return async () => {
-    await stopChild(child);
-    await dropDatabase(cluster.superuserUrl, database);
-    await cluster.stop();
-  };
-}
-
-async function dropDatabase(superuserUrl: string, database: string): Promise<void> {
-  const client = new pg.Client({ connectionString: superuserUrl });
-  await client.connect();
-  await client.query(`drop database if exists ${database} with (force)`).finally(() => client.end());
+  const { product, stop } = await startProduct('e2e');
+  project.provide('product', product);
+  return stop;
 }
