@@ -37,7 +37,8 @@ export function forestGeometry(
         ? null
         : { x: sleeveX, width: sleeveWidth, hatch: hatchPath({ x: sleeveX, y: 0, width: sleeveWidth, height }) },
     interval: interval && { x1: held(interval[0]), x2: held(interval[1]) },
-    markX: held(estimate),
+    // Held a little inside the edge, so that the arrow which says "further out" stays free.
+    markX: Math.max(edge + 8, Math.min(width - edge - 8, held(estimate))),
     side: estimate < 0 ? 'trail' : 'lead',
     beyondStart: Math.min(estimate, interval?.[0] ?? estimate) < -range,
     beyondEnd: Math.max(estimate, interval?.[1] ?? estimate) > range,

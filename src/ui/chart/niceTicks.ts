@@ -6,7 +6,7 @@
  * @param high largest value to show
  * @param count wished number of ticks, at least 2
  * @throws {RangeError} if a bound is not finite, they are out of order, or count is under 2
- * @example niceTicks(163, 185, 3) // → [160, 175, 190]
+ * @example niceTicks(163, 185, 3) // → [160, 180, 200]
  */
 export function niceTicks(low: number, high: number, count = 4): number[] {
   if (!Number.isFinite(low) || !Number.isFinite(high) || low > high) {
@@ -22,12 +22,14 @@ export function niceTicks(low: number, high: number, count = 4): number[] {
     const first = Math.floor(tidy(from / step));
     const last = Math.ceil(tidy(to / step));
     const ticks = Array.from({ length: last - first + 1 }, (_, i) => tidy((first + i) * step));
-    if (!best || distance(ticks, count) < distance(best, count)) best = ticks;
+    if (!best || cost(ticks, to - from, count) < cost(best, to - from, count)) best = ticks;
   }
   return best!;
 }
 
-const distance = (ticks: readonly number[], count: number): number => Math.abs(ticks.length - count);
+// A tick too many or too few weighs as much as an axis half as long again as what it shows.
+const cost = (ticks: readonly number[], range: number, count: number): number =>
+  Math.abs(ticks.length - count) + 2 * ((ticks.at(-1)! - ticks[0]!) / range - 1);
 
 function steps(from: number, to: number, count: number): number[] {
   const power = 10 ** Math.floor(Math.log10((to - from) / count));

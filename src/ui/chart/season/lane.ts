@@ -14,7 +14,8 @@ export interface Drawn {
   band: string;
   /** From the line down to 0. */
   area: string;
-  points: { x: number; y: number; whisker: { y1: number; y2: number } | null }[];
+  /** `alone`: no neighbour to draw a line or a band to. */
+  points: { x: number; y: number; whisker: { y1: number; y2: number } | null; alone: boolean }[];
 }
 
 /**
@@ -27,7 +28,10 @@ export function laneAxis(
   points: readonly SeasonPoint[],
   { top, height, count, withZero = false }: { top: number; height: number; count: number; withZero?: boolean },
 ): Axis {
-  const values = points.flatMap(({ value, interval }) => [value, ...(withZero ? [0] : (interval ?? []))]);
+  const values = points.flatMap(({ value, interval }) => [
+    value,
+    ...(withZero ? [0, interval?.[1] ?? 0] : (interval ?? [])),
+  ]);
   const ticks = niceTicks(Math.min(...values), Math.max(...values), count);
   const y = linearScale([ticks[0]!, ticks.at(-1)!], [top + height, top]);
   const digits = Math.max(...ticks.map((tick) => (String(tick).split('.')[1] ?? '').length));
@@ -52,6 +56,8 @@ export function drawSeries(
     line: linePath(parts),
     band: bandPath(parts),
     area: bandPath(parts.map((run) => run.map((place) => ({ x: place.x, upper: place.y, lower: y(0) })))),
-    points: placed.map((place) => ({ x: place.x, y: place.y, whisker: place.whisker })),
+    points: parts.flatMap((run) =>
+      run.map((place) => ({ x: place.x, y: place.y, whisker: place.whisker, alone: run.length === 1 })),
+    ),
   };
 }

@@ -1,5 +1,5 @@
 import type { SeasonOutrun } from '#src/ui/chart/season/season.ts';
-import { textWidth } from '#src/ui/chart/season/termBands.ts';
+import { textWidth } from '#src/ui/chart/textWidth.ts';
 
 export interface DrawnOutrun {
   x1: number;
@@ -27,7 +27,7 @@ export function outrunLane(
         const said = word ?? (level ? WORDS[level] : 'cleared');
         const after = marks.find((mark) => mark > at) ?? Infinity;
         const above = after - at < BESIDE * 2 + textWidth(said, font);
-        return { x: at, level, word: said, labelX: above ? at - 8 : at + BESIDE, labelAbove: above };
+        return { x: at, level, word: said, labelX: above ? at + 7 : at + BESIDE, labelAbove: above };
       }),
     };
   });

@@ -32,7 +32,7 @@ export interface SeasonLayout {
   outruns: { y: number; drawn: DrawnOutrun[] } | null;
 }
 
-const ABOVE = 22;
+const ABOVE = 32;
 
 /**
  * Every place of a Season line in one size: a shared time axis, one lane below the other.
@@ -68,7 +68,8 @@ export function seasonLayout(season: Season, size: SeasonSize): SeasonLayout {
     const height = size.lane[key];
     const laneTop = place(height);
     const all = series.flatMap(({ points }) => points);
-    const axis = all.length > 0 ? laneAxis(all, { top: laneTop, height, count: size.ticks, withZero }) : null;
+    const axis =
+      all.length > 0 ? laneAxis(all, { top: laneTop, height, count: withZero ? 3 : size.ticks, withZero }) : null;
     const drawn = axis
       ? series.map(({ kind, points }) => ({ kind, drawn: drawSeries(points, { x, y: axis.y, termOf }) }))
       : [];

@@ -69,7 +69,7 @@ export function seasonTable({ carry, strength, growth, outruns }: Season): Seaso
         points === null
           ? dateWords(on)
           : cell(
-              points.find((point) => point.on === on),
+              points.filter((point) => point.on === on),
               digits,
             ),
       ),
@@ -78,10 +78,13 @@ export function seasonTable({ carry, strength, growth, outruns }: Season): Seaso
   };
 }
 
-function cell(point: SeasonPoint | undefined, digits: number): string | null {
-  if (!point) return null;
-  const value = plainNumber(point.value, digits);
-  return point.interval ? `${value} (${intervalWords(point.interval, digits)})` : value;
+// Two sessions on one day share its row.
+function cell(points: readonly SeasonPoint[], digits: number): string | null {
+  const said = points.map(({ value, interval }) => {
+    const plain = plainNumber(value, digits);
+    return interval ? `${plain} (${intervalWords(interval, digits)})` : plain;
+  });
+  return said.length > 0 ? said.join('; ') : null;
 }
 
 const stepWords = (steps: readonly { level: 'look' | 'act' | null; word?: string }[]): string | null =>

@@ -27,7 +27,7 @@ export const SEASON_SIZES: readonly SeasonSize[] = [
   {
     name: 'middle',
     width: 720,
-    left: 122,
+    left: 136,
     right: 86,
     namesAbove: false,
     font: { name: 15, small: 13.5 },

@@ -1,7 +1,5 @@
+import { textWidth } from '#src/ui/chart/textWidth.ts';
 import type { SeasonTerm } from '#src/ui/chart/season/season.ts';
-
-/** How wide a text of a size is, roughly: for choosing a label, never for placing one. */
-export const textWidth = (text: string, font: number): number => text.length * font * 0.54;
 
 /**
  * A term's name where the whole name has no room: `Autumn 2024` → `Aut 24`.
