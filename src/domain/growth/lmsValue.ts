@@ -7,6 +7,9 @@ export interface Lms {
   s: number;
 }
 
+/** Powers below it are 0: the two forms agree to their last digits there, and L·S cannot underflow. */
+const NEAR_0 = 1e-12;
+
 /**
  * The measure at a z score of a growth reference, M·(1 + L·S·z)^(1/L), or M·e^(S·z) where L is 0: the curves of a
  * centile chart.
@@ -24,7 +27,7 @@ export function lmsValue({ l, m, s }: Lms, z: number): number | null {
   requireFiniteNumber('lmsValue', 'm', m, { above: 0 });
   requireFiniteNumber('lmsValue', 's', s, { above: 0 });
   requireFiniteNumber('lmsValue', 'z', z);
-  if (l === 0) return finite(m * Math.exp(s * z));
+  if (Math.abs(l) < NEAR_0) return finite(m * Math.exp(s * z));
   const power = l * s * z;
   return power > -1 ? finite(m * Math.exp(Math.log1p(power) / l)) : null;
 }

@@ -1,6 +1,9 @@
 import type { Lms } from '#src/domain/growth/lmsValue.ts';
 import { requireFiniteNumber } from '#src/domain/statistics/requireFiniteNumber.ts';
 
+/** Powers below it are 0: the two forms agree to their last digits there, and L·S cannot underflow. */
+const NEAR_0 = 1e-12;
+
 /**
  * The standard score of a measure in a growth reference: ((value ÷ M)^L − 1) ÷ (L·S), or ln(value ÷ M) ÷ S where L is
  * 0. `expm1` keeps the digits where L is near 0.
@@ -19,5 +22,5 @@ export function lmsZ({ l, m, s }: Lms, value: number): number {
   requireFiniteNumber('lmsZ', 's', s, { above: 0 });
   requireFiniteNumber('lmsZ', 'value', value, { above: 0 });
   const logRatio = Math.log(value / m);
-  return l === 0 ? logRatio / s : Math.expm1(l * logRatio) / (l * s);
+  return Math.abs(l) < NEAR_0 ? logRatio / s : Math.expm1(l * logRatio) / (l * s);
 }

@@ -41,11 +41,12 @@ export interface MaturityResult {
  *
  * Sources: Mirwald 2002, Moore 2015, Fransen 2018 (boys only): SCIENCE §5.
  *
- * @returns offsets and ages in years, with the cautions as sentences; reason where no formula applies
+ * @returns offsets and ages in years, with the cautions as sentences
  * @throws {RangeError} if a number is not positive, or the sitting height is not below the stature
  * @example maturity({ sex: 'male', age: 12, stature: 150, sittingHeight: 78, mass: 40 }).mirwald?.offset // → −1.786643
  */
-export function maturity({ sex, age, stature, sittingHeight, mass }: MaturityInput): MaturityResult {
+export function maturity(input: MaturityInput): MaturityResult {
+  const { sex, age, stature, sittingHeight, mass } = input;
   requireFiniteNumber('maturity', 'age', age, { above: 0, max: 120 });
   requireFiniteNumber('maturity', 'stature', stature, { above: 0 });
   if (mass !== undefined) requireFiniteNumber('maturity', 'mass', mass, { above: 0 });
@@ -58,7 +59,8 @@ export function maturity({ sex, age, stature, sittingHeight, mass }: MaturityInp
   const withAge = (offset: number): MaturityOffset => ({ offset, ageAtPhv: age - offset });
   const full = sittingHeight !== undefined && mass !== undefined ? { sex, age, stature, sittingHeight, mass } : null;
   const mirwald = full ? withAge(mirwaldOffset(full)) : null;
-  const moore = sittingHeight === undefined ? null : withAge(mooreOffset({ sex, age, sittingHeight }));
+  const byMoore = mooreOffset({ sex, age, stature, sittingHeight });
+  const moore = byMoore === null ? null : withAge(byMoore);
   const mooreStature = sex === 'male' ? withAge(mooreStatureOffset({ age, stature })) : null;
   const ratio = full && sex === 'male' ? fransenRatio(full) : null;
   const fransen = ratio !== null && ratio > 0 ? { ratio, ageAtPhv: age / ratio } : null;
@@ -70,8 +72,16 @@ export function maturity({ sex, age, stature, sittingHeight, mass }: MaturityInp
     fransen,
     band: chosen && bandOf(chosen.offset),
     cautions: chosen ? maturityCautions({ sex, age, offset: chosen.offset, ratioUsed: fransen !== null }) : [],
-    reason: chosen ? null : 'for girls no formula without the sitting height is published',
+    reason: reasonFor(input, ratio),
   };
+}
+
+function reasonFor({ sittingHeight, mass }: MaturityInput, ratio: number | null): string | null {
+  const lacking: string[] = [];
+  if (sittingHeight === undefined) lacking.push('the sitting height');
+  if (mass === undefined) lacking.push('the mass');
+  if (lacking.length > 0) return `without ${lacking.join(' and ')} not every estimate can be given`;
+  return ratio !== null && ratio <= 0 ? 'the Fransen ratio has no meaning for these measures' : null;
 }
 
 function bandOf(offset: number): MaturityBand {
