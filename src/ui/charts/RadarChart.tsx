@@ -74,12 +74,7 @@ export function RadarChart({ axes, series, says, unit, rings, width = 328, heigh
     return (
       <g transform={`translate(${centerX} ${centerY})`}>
         {levels.map((level) => (
-          <g key={level}>
-            <path d={outline(axes.map(() => level))} fill="none" stroke="var(--rule)" />
-            <text x={-6} y={at(level, 0).y + 4} textAnchor="end" fontSize={12.5} fill="var(--soft)">
-              {level === highest ? `${level} ${unit}` : level}
-            </text>
-          </g>
+          <path key={level} d={outline(axes.map(() => level))} fill="none" stroke="var(--rule)" />
         ))}
         {series.map(({ kind, label, values }) => (
           <path
@@ -98,6 +93,21 @@ export function RadarChart({ axes, series, says, unit, rings, width = 328, heigh
               <SeriesPoint key={`${label} ${axes[i]}`} kind={kind} {...at(value, i)} size={8} />
             )),
           )}
+        {levels.map((level) => (
+          <text
+            key={level}
+            x={-9}
+            y={at(level, 0).y + 4}
+            textAnchor="end"
+            fontSize={12.5}
+            fill="var(--soft)"
+            stroke="var(--paper)"
+            strokeWidth={4}
+            paintOrder="stroke"
+          >
+            {level === highest ? `${level} ${unit}` : level}
+          </text>
+        ))}
         {series.map(({ kind, label, values }, i) => (
           <g key={label}>
             <path
