@@ -1,4 +1,4 @@
-const SMALL = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten', 'eleven', 'twelve'];
+import { numberWord } from '#src/ui/words/numberWord.ts';
 
 /**
  * A count with its noun, small numbers in words, the first letter large.
@@ -6,6 +6,6 @@ const SMALL = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eig
  * @example countWords(2, 'athlete', 'athletes') // → 'Two athletes'
  */
 export function countWords(count: number, one: string, many: string): string {
-  const number = SMALL[count] ?? String(count);
+  const number = numberWord(count);
   return `${number.charAt(0).toUpperCase()}${number.slice(1)} ${count === 1 ? one : many}`;
 }

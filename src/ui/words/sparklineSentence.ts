@@ -1,3 +1,4 @@
+import { numberWord } from '#src/ui/words/numberWord.ts';
 import { plainNumber } from '#src/ui/words/numberWords.ts';
 
 /**
@@ -13,11 +14,6 @@ export function sparklineSentence(values: readonly (number | null)[], name: stri
   if (first === undefined || last === undefined) return `${name}: no value yet`;
   const value = (number: number) => `${plainNumber(number, digits)} ${unit}`;
   if (present.length === 1) return `${name} ${value(first)}, one value`;
-  const gaps = missing > 0 ? `, ${countWords(missing)} without a value` : '';
-  return `${name} ${value(first)} to ${value(last)} over ${countWords(values.length)} terms${gaps}`;
+  const gaps = missing > 0 ? `, ${numberWord(missing)} without a value` : '';
+  return `${name} ${value(first)} to ${value(last)} over ${numberWord(values.length)} terms${gaps}`;
 }
-
-const COUNTS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
-
-/** A small count as a word, ten at most; above that the digits. */
-export const countWords = (count: number): string => COUNTS[count] ?? String(count);
