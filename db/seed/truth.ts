@@ -66,7 +66,7 @@ export const TRUTHS: readonly Truth[] = [
     ...{ plays: 'left', leadPct: [-9, -10, -11], statureZ: 0.6, tempoMonths: -8 },
   }),
   curlew({
-    ...{ givenName: 'Tomasz', familyName: 'Brandt', sex: 'male', birthDate: '2011-02-03', carryM: 178 },
+    ...{ givenName: 'Tomasz', familyName: 'Brandt', sex: 'male', birthDate: '2011-02-03', carryM: 158 },
     ...{ ...outrun, leadPct: [-5, -7, -8, -10, -11, -10, -10], demand: 1.04 },
   }),
   curlew({
@@ -103,7 +103,7 @@ export const TRUTHS: readonly Truth[] = [
     style: 'reverse',
   }),
   curlew({
-    ...{ givenName: 'Emeka', familyName: 'Achterberg', sex: 'male', birthDate: '2012-03-22', carryM: 150 },
+    ...{ givenName: 'Emeka', familyName: 'Achterberg', sex: 'male', birthDate: '2012-03-22', carryM: 138 },
     ...{ ...outrun, leadPct: [-6, -8, -9, -11, -12, -13, -13], demand: 1.12 },
   }),
   curlew({

@@ -1,4 +1,5 @@
-import type { OutrunCriterion, OutrunResult } from '#src/domain/outrun/outrun.ts';
+import type { Criterion } from '#src/domain/outrun/criterion.ts';
+import type { OutrunResult } from '#src/domain/outrun/outrun.ts';
 import { CRITERION_LABELS } from '#src/domain/outrun/criterionLabels.ts';
 import { intervalWords, signedNumber, plainNumber } from '#src/ui/words/numberWords.ts';
 
@@ -17,8 +18,8 @@ const UNITS: Readonly<Record<string, { unit: string; digits: number; signed: boo
 export function criteriaRows(result: unknown) {
   const { criteria } = result as Pick<OutrunResult, 'criteria'>;
   return criteria
-    .filter(({ kind }: OutrunCriterion) => kind !== 'information')
-    .map((criterion: OutrunCriterion) => ({
+    .filter(({ kind }) => kind !== 'information')
+    .map((criterion) => ({
       label: CRITERION_LABELS[criterion.name],
       verdict: criterion.verdict,
       ...criterionWords(criterion),
@@ -26,7 +27,7 @@ export function criteriaRows(result: unknown) {
 }
 
 /** Value and interval of a criterion with its unit. */
-export function criterionWords({ name, value, interval90 }: Pick<OutrunCriterion, 'name' | 'value' | 'interval90'>) {
+export function criterionWords({ name, value, interval90 }: Pick<Criterion, 'name' | 'value' | 'interval90'>) {
   const { unit, digits, signed } = UNITS[name]!;
   const number = value === null ? '' : (signed ? signedNumber : plainNumber)(value, digits);
   return {

@@ -51,7 +51,7 @@ export function compareLegs(session: TestSession, leadSide: Side): LegComparison
     trailN: trail.length,
   };
   if (session.comparesIn === 'degrees') {
-    const degrees = ((common.leadMean - common.trailMean) * 180) / Math.PI;
+    const degrees = common.leadMean - common.trailMean;
     return {
       ...common,
       typicalErrorPct: null,

@@ -1,6 +1,6 @@
 import { plainNumber } from '#src/ui/words/numberWords.ts';
 
-/** How a unit shows an SI value: what to multiply by, and how many decimals are honest. */
+/** How a unit shows a stored value (SI, angles in degrees): what to multiply by, and how many decimals are honest. */
 const UNITS: Readonly<Record<string, { perSi: number; digits: number }>> = {
   N: { perSi: 1, digits: 0 },
   'N/kg': { perSi: 1, digits: 1 },
@@ -10,7 +10,7 @@ const UNITS: Readonly<Record<string, { perSi: number; digits: number }>> = {
   kg: { perSi: 1, digits: 1 },
   s: { perSi: 1, digits: 1 },
   ms: { perSi: 1000, digits: 0 },
-  '°': { perSi: 180 / Math.PI, digits: 0 },
+  '°': { perSi: 1, digits: 0 },
   'm/s': { perSi: 1, digits: 1 },
   rpm: { perSi: 1, digits: 0 },
 };
