@@ -1,7 +1,9 @@
-/// <reference types="astro/client" />
+import type { Viewer } from '#src/access/viewer.ts';
 
-declare namespace App {
-  interface Locals {
-    viewer: import('#src/access/viewer.ts').Viewer | null;
+declare global {
+  namespace App {
+    interface Locals {
+      viewer: Viewer | null;
+    }
   }
 }

@@ -57,12 +57,13 @@ export const ROUTES: readonly Route[] = [
   api('GET', '/api/openapi.json', 'public'),
 ];
 
-const BY_KEY = new Map(ROUTES.map((route) => [`${route.method} ${route.pattern}`, route]));
+// The framework spells its patterns in small letters.
+const BY_KEY = new Map(ROUTES.map((route) => [`${route.method} ${route.pattern.toLowerCase()}`, route]));
 
 /** The registered route for a pattern and method; HEAD reads as GET. */
 export function findRoute(pattern: string, method: string): Route | undefined {
-  return BY_KEY.get(`${method === 'HEAD' ? 'GET' : method} ${pattern}`);
+  return BY_KEY.get(`${method === 'HEAD' ? 'GET' : method} ${pattern.toLowerCase()}`);
 }
 
 /** Whether the pattern is registered for another method. */
-export const hasPattern = (pattern: string): boolean => ROUTES.some((route) => route.pattern === pattern);
+export const hasPattern = (pattern: string): boolean => ROUTES.some((route) => route.pattern.toLowerCase() === pattern.toLowerCase());

@@ -6,7 +6,7 @@ import { Z90 } from '#src/domain/statistics/z90.ts';
 
 /** Growth velocity with half of its 90 % interval, `7.4 ± 1.2`, or null where it cannot be given. */
 export function growthWords(velocity: RecordHeader['velocity']): string | null {
-  if (velocity?.perYear == null || velocity.standardError === null) return null;
+  if (!velocity || velocity.perYear === null || velocity.standardError === null) return null;
   return `${plainNumber(velocity.perYear, 1)} ± ${plainNumber(Z90 * velocity.standardError, 1)}`;
 }
 

@@ -59,7 +59,7 @@ function aboutLegs(name: string, leadSide: 'left' | 'right', newest: readonly Co
 }
 
 function aboutGrowth(name: string, velocity: Figures['header']['velocity']): string {
-  if (velocity?.perYear == null || velocity.standardError === null) return '';
+  if (!velocity || velocity.perYear === null || velocity.standardError === null) return '';
   const verb = name === 'you' ? 'You are' : `${name} is`;
   return `${verb} growing ${plainNumber(velocity.perYear, 1)} cm a year, give or take ${plainNumber(Z90 * velocity.standardError, 1)} cm.`;
 }

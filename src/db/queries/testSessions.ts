@@ -56,5 +56,8 @@ export function listTestSessions(trx: Tx, athleteIds: readonly string[]): Promis
     .where('test.sided', '=', true)
     .groupBy(['trial.athlete_id', 'testing_day.id', 'test.id'])
     .orderBy('testing_day.held_on')
+    // Push, jump and hop first, as the coaches name them; then the others.
+    .orderBy(sql`array_position(array['push', 'jump', 'hop'], test.capacity)`)
+    .orderBy('test.name')
     .execute();
 }
