@@ -37,8 +37,7 @@ export async function seedDemo(): Promise<SeededPeople['accounts']> {
     .values({
       academy_id: academy.academyId,
       athlete_id: academy.athletes.get('Tomasz Brandt')!,
-      allowed:
-        'No jumping and no full driver swings until 4 December; putting and short game as usual',
+      allowed: 'No jumping and no full driver swings until 4 December; putting and short game as usual',
       set_by: people.ids['strength']!,
       set_at: '2026-11-28T09:00:00Z',
     })

@@ -66,4 +66,5 @@ export function findRoute(pattern: string, method: string): Route | undefined {
 }
 
 /** Whether the pattern is registered for another method. */
-export const hasPattern = (pattern: string): boolean => ROUTES.some((route) => route.pattern.toLowerCase() === pattern.toLowerCase());
+export const hasPattern = (pattern: string): boolean =>
+  ROUTES.some((route) => route.pattern.toLowerCase() === pattern.toLowerCase());
