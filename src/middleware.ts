@@ -36,6 +36,7 @@ export const onRequest = defineMiddleware(async (context, next) => {
     reportError(error, routePattern);
     if (isApi) return problemOf(error);
     const status = statusOf(error);
-    return status === 403 ? next('/forbidden') : new Response(null, { status });
+    if (status === 403) return next('/forbidden');
+    return status === 503 ? next('/unavailable') : new Response(null, { status });
   }
 });

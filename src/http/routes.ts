@@ -24,6 +24,7 @@ export const ROUTES: readonly Route[] = [
   page('/404', 'public'),
   page('/500', 'public'),
   page('/forbidden', 'public'),
+  page('/unavailable', 'public'),
   page('/sign-in', 'public'),
   page('/privacy', 'public'),
   page('/method', 'public'),
