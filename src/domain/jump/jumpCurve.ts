@@ -3,6 +3,7 @@ import { findTakeoff, type Takeoff } from '#src/domain/jump/findTakeoff.ts';
 import { jumpPhases, type JumpPhase } from '#src/domain/jump/jumpPhases.ts';
 import {
   bodyWeightProblem,
+  driftProblem,
   heightsProblem,
   movementProblem,
   noTakeoffProblem,
@@ -123,6 +124,8 @@ export function jumpCurve({ sampleRate, force, g = 9.81 }: JumpCurveInput): Jump
     restless: phases.restless,
   });
   if (movement !== null) return refused([movement], remarks, weighed);
+  const drift = driftProblem(force, sampleRate, bodyWeight, Math.max(start, weighing.samples), takeoff);
+  if (drift !== null) return refused([drift], remarks, { weighingSd: weighing.sdN });
 
   const takeoffVelocity = motion.velocity.at(-1)!;
   const height = takeoffVelocity ** 2 / (2 * g);

@@ -1,3 +1,4 @@
+import { findLowRuns } from '#src/domain/jump/findLowRuns.ts';
 import { findTakeoff } from '#src/domain/jump/findTakeoff.ts';
 import type { FirstSecond } from '#src/domain/signal/firstSecond.ts';
 import { median } from '#src/domain/statistics/median.ts';
@@ -8,6 +9,9 @@ const MOST_WEIGHING_SD_SHARE = 0.01;
 /** How far the empty plate may read from 0 in flight: 2 N or 0.5 % of body weight. */
 const ZERO_N = 2;
 const ZERO_SHARE = 0.005;
+/** How far body weight may drift from the weighing to take-off: 3 N or 1 % of body weight. */
+const DRIFT_N = 3;
+const DRIFT_SHARE = 0.01;
 /** A stretch this long back at body weight after the onset means that the onset was another movement. */
 const BACK_TO_QUIET_S = 0.2;
 const RESTING_MPS = 0.05;
@@ -43,7 +47,7 @@ export interface CurveFromStart {
 }
 
 /**
- * Why no take-off was found: a shifted zero, a file that ends too soon, or no jump.
+ * Why no take-off was found: a shifted zero, stepping off, a file that ends too soon, or no jump.
  *
  * @param curve the curve with its body weight and onset band (N)
  * @returns the problem in words
@@ -54,6 +58,8 @@ export function noTakeoffProblem({ force, sampleRate, bodyWeight, mass, start, b
     const readsN = flightReading(force, sampleRate, shifted.takeoff, shifted.landing);
     return `the zero of the plate has moved: it reads ${readsN.toFixed(1)} N in flight`;
   }
+  const left = findLowRuns(force, sampleRate, SHIFTED_FLIGHT_SHARE * bodyWeight, start).at(-1)?.end === null;
+  if (left) return 'no take-off: the plate is left without a jump';
   const tail = Math.max(1, Math.round(0.05 * sampleRate));
   let sum = 0;
   for (let i = Math.max(0, force.length - tail); i < force.length; i += 1) sum += force[i]!;
@@ -89,6 +95,37 @@ function flightReading(force: ArrayLike<number>, sampleRate: number, takeoff: nu
   const quarter = Math.floor((end - takeoff) / 4);
   const length = Math.max(1, end - takeoff - 2 * quarter);
   return median(Float64Array.from({ length }, (_, i) => force[takeoff + quarter + i]!));
+}
+
+/**
+ * Whether the force slopes while the athlete stands, so that body weight is another by take-off: a drifting plate or a
+ * slow movement. The slope is that of least squares over the quiet samples.
+ *
+ * @param force       N
+ * @param sampleRate  samples per second
+ * @param bodyWeightN N
+ * @param quietEnd    first sample not quiet any more
+ * @param takeoff     index of take-off
+ * @returns the problem in words, or null
+ */
+export function driftProblem(
+  force: ArrayLike<number>,
+  sampleRate: number,
+  bodyWeightN: number,
+  quietEnd: number,
+  takeoff: number,
+): string | null {
+  const middle = (quietEnd - 1) / 2;
+  let moment = 0;
+  let spread = 0;
+  for (let i = 0; i < quietEnd; i += 1) {
+    moment += (i - middle) * (force[i]! - bodyWeightN);
+    spread += (i - middle) ** 2;
+  }
+  const slope = moment / spread;
+  const byTakeoffN = slope * (takeoff - sampleRate / 2);
+  if (Math.abs(byTakeoffN) <= Math.max(DRIFT_N, DRIFT_SHARE * bodyWeightN)) return null;
+  return `no quiet second: the force drifts by ${(slope * sampleRate).toFixed(1)} N/s while standing`;
 }
 
 /** A jump with its edges, for the search for movement before it. */

@@ -26,8 +26,7 @@ export function theilSen(x: readonly number[], y: readonly number[]): TheilSen {
   const slopes = sortedPairSlopes(x, y);
   if (slopes.length === 0) return { slope: null, intercept: null, slopeCi90: null };
   const upper = slopes.length >> 1;
-  // `+ 0` keeps −0 out of the answer
-  const slope = (slopes.length % 2 === 1 ? slopes[upper]! : (slopes[upper - 1]! + slopes[upper]!) / 2) + 0;
+  const slope = slopes.length % 2 === 1 ? slopes[upper]! : (slopes[upper - 1]! + slopes[upper]!) / 2;
   const intercept = median(y) - slope * median(x);
   const deviation = Z90 * Math.sqrt(senVariance(x, y));
   const lowRank = roundHalfToEven((slopes.length - deviation) / 2) - 1;
@@ -44,7 +43,8 @@ function sortedPairSlopes(x: readonly number[], y: readonly number[]): Float64Ar
   for (let i = 0; i < n; i += 1) {
     for (let j = i + 1; j < n; j += 1) {
       if (x[j] === x[i]) continue;
-      slopes[count] = (y[j]! - y[i]!) / (x[j]! - x[i]!);
+      // `+ 0` keeps −0 out of the answer
+      slopes[count] = (y[j]! - y[i]!) / (x[j]! - x[i]!) + 0;
       count += 1;
     }
   }
