@@ -16,7 +16,8 @@ export interface FirstSecond {
  * @returns null where the curve is shorter than one second or the second has fewer than two samples
  */
 export function firstSecond(force: ArrayLike<number>, sampleRate: number): FirstSecond | null {
-  const samples = Math.floor(sampleRate);
+  // a rate worked out from time stamps may read 999.9999999
+  const samples = Math.floor(sampleRate * (1 + 1e-6));
   if (samples < 2 || force.length < samples) return null;
   const second = Float64Array.from({ length: samples }, (_, i) => force[i]!);
   return { samples, meanN: mean(second), sdN: sampleStandardDeviation(second) };

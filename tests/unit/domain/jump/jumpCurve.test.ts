@@ -101,6 +101,13 @@ describe('jumpCurve', () => {
     expect(result.reason).toBeNull();
   });
 
+  it('takes a rate worked out from time stamps', () => {
+    const { force } = madeJump({ sampleRate: 200 });
+    const result = jumpCurve({ sampleRate: 199.99999999, force });
+    expect(result.quality.ok).toBe(true);
+    expect(result.onsetIndex).toBe(jumpCurve({ sampleRate: 200, force }).onsetIndex);
+  });
+
   it('refuses a rate below 200 Hz', () => {
     expectRefused(jumpCurve(madeJump({ sampleRate: 100 })), 'sample rate 100 Hz is too low');
   });
