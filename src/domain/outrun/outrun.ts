@@ -6,12 +6,15 @@ import type { OutrunLevel } from '#src/domain/outrun/level.ts';
 import type { OutrunInput } from '#src/domain/outrun/outrunInput.ts';
 import type { OutrunPolicy } from '#src/domain/outrun/policy.ts';
 
+/** One criterion of a judgement. */
+export type OutrunCriterion = Criterion;
+
 /** A judgement: level, points, the eight criteria in order, what would clear it, what to rule out. */
 export interface OutrunResult {
   level: OutrunLevel | null;
   points: number;
   gate: boolean;
-  criteria: Criterion[];
+  criteria: OutrunCriterion[];
   clearsWhen: string[];
   falseAlarms: string[];
   policy: OutrunPolicy;
