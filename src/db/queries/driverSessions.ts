@@ -18,6 +18,7 @@ export interface DriverSessionRow {
   launchDeg: number[];
   spinRpm: number[];
   attackDeg: number[];
+  dynamicLoftDeg: number[];
   excluded: number;
   otherClubs: number;
 }
@@ -47,6 +48,7 @@ export function listDriverSessions(trx: Tx, athleteIds: readonly string[]): Prom
       counted('launch_deg').as('launchDeg'),
       counted('spin_rpm').as('spinRpm'),
       counted('attack_deg').as('attackDeg'),
+      counted('dynamic_loft_deg').as('dynamicLoftDeg'),
       sql<number>`count(*) filter (where shot.club = 'driver' and shot.state = 'excluded')`.as('excluded'),
       sql<number>`count(*) filter (where shot.club = 'other')`.as('otherClubs'),
     ])

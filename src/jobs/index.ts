@@ -1,0 +1,5 @@
+import type { TaskList } from 'graphile-worker';
+import { rejudgeOthers } from '#src/jobs/rejudgeOthers.ts';
+
+/** Every job by its name in the queue. */
+export const tasks: TaskList = { rejudgeOthers };
