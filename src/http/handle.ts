@@ -1,7 +1,9 @@
 import type { APIContext, APIRoute } from 'astro';
 import type { Viewer } from '#src/access/viewer.ts';
 import { AppError } from '#src/errors/appError.ts';
-import { problemOf } from '#src/http/problem.ts';
+import { problemOf, statusOf } from '#src/http/problem.ts';
+import { isForm } from '#src/http/readInput.ts';
+import { safePath } from '#src/http/safePath.ts';
 import { reportError } from '#src/errors/reportError.ts';
 
 /**
@@ -29,9 +31,17 @@ function answer(work: (context: APIContext) => Promise<unknown>): APIRoute {
       return result === undefined ? new Response(null, { status: 204 }) : Response.json(result);
     } catch (error) {
       reportError(error, context.routePattern);
-      return problemOf(error);
+      return isForm(context.request) ? backToForm(context, error) : problemOf(error);
     }
   };
+}
+
+/** A form that could not be done leads back to its page, which says why. */
+function backToForm({ request, redirect }: APIContext, error: unknown): Response {
+  const referer = request.headers.get('referer');
+  const page = referer && URL.canParse(referer) ? safePath(new URL(referer).pathname) : '/today';
+  const code = error instanceof AppError ? error.code : statusOf(error) === 503 ? 'unavailable' : 'failed';
+  return redirect(`${page}?problem=${code}`, 303);
 }
 
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;

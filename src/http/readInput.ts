@@ -20,10 +20,14 @@ export async function readInput<S extends z.ZodType>(
   schema: S,
 ): Promise<Input<z.infer<S>>> {
   const { request } = context;
-  if (!/^application\/x-www-form-urlencoded\b/i.test(request.headers.get('content-type') ?? '')) {
+  if (!isForm(request)) {
     return { input: await parseBody(request, schema), done: (result) => Response.json(result) };
   }
   const { to, ...fields } = Object.fromEntries(new URLSearchParams(await request.text()));
   const given = Object.fromEntries(Object.entries(fields).filter(([, value]) => value !== ''));
   return { input: parse(given, schema), done: (_, page) => context.redirect(safePath(to, page), 303) };
 }
+
+/** Whether a request is a plain form's, sent by a browser without a script. */
+export const isForm = (request: Request): boolean =>
+  /^application\/x-www-form-urlencoded\b/i.test(request.headers.get('content-type') ?? '');
