@@ -15,8 +15,8 @@ const COLUMNS = ['id', 'squad_id as squadId', 'battery_id as batteryId', 'held_o
 export async function addTestingDay(
   trx: Tx,
   day: { academyId: string; squadId: string; batteryId: string; heldOn: string; recordedBy: string },
-): Promise<TestingDayRow> {
-  await trx
+): Promise<TestingDayRow & { added: boolean }> {
+  const { numInsertedOrUpdatedRows } = await trx
     .insertInto('testing_day')
     .values({
       academy_id: day.academyId,
@@ -26,7 +26,7 @@ export async function addTestingDay(
       recorded_by: day.recordedBy,
     })
     .onConflict((conflict) => conflict.columns(['squad_id', 'battery_id', 'held_on']).doNothing())
-    .execute();
+    .executeTakeFirst();
   const row = await trx
     .selectFrom('testing_day')
     .select(COLUMNS)
@@ -34,7 +34,7 @@ export async function addTestingDay(
     .where('battery_id', '=', day.batteryId)
     .where('held_on', '=', day.heldOn)
     .executeTakeFirstOrThrow();
-  return row as TestingDayRow;
+  return { ...(row as TestingDayRow), added: numInsertedOrUpdatedRows === 1n };
 }
 
 /** Testing days in scope, locked until the transaction ends so that none is closed while trials go into it. */

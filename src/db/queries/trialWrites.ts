@@ -33,15 +33,6 @@ export function listTrialsOfDays(trx: Tx, dayIds: readonly string[]): Promise<St
     .execute();
 }
 
-/** Trials that already bear one of these ids, wherever they are in scope. */
-export function listTrialIds(trx: Tx, ids: readonly string[]): Promise<{ id: string }[]> {
-  return trx
-    .selectFrom('trial')
-    .select('id')
-    .where('id', 'in', [...ids])
-    .execute();
-}
-
 /** Medians of the valid trials of earlier days, by athlete, test and side, in SI. */
 export function listEarlierMedians(trx: Tx, athleteIds: readonly string[], before: string) {
   return trx
