@@ -33,6 +33,13 @@ export async function seedDemo(): Promise<SeededPeople['accounts']> {
     await seedDecisions(db, academy, people, term);
   }
   await db
+    .insertInto('testing_day')
+    .values({
+      ...{ academy_id: academy.academyId, squad_id: academy.squads.get('Curlew')!, battery_id: academy.batteryId },
+      ...{ held_on: '2026-11-28', recorded_by: people.ids['strength'] },
+    })
+    .execute();
+  await db
     .insertInto('restriction')
     .values({
       academy_id: academy.academyId,

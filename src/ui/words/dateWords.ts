@@ -28,3 +28,6 @@ export function dateWords(date: string, form: 'short' | 'day' | 'long' = 'long')
   if (form === 'short') return `${Number(day)} ${name.slice(0, 3)}`;
   return form === 'day' ? `${Number(day)} ${name}` : `${Number(day)} ${name} ${year}`;
 }
+
+/** A text with every YYYY-MM-DD in it said in words. */
+export const datesInWords = (text: string): string => text.replace(/\b\d{4}-\d{2}-\d{2}\b/g, (date) => dateWords(date));

@@ -10,15 +10,22 @@ interface Outrun {
   mayBeCleared: boolean;
 }
 
-const ROUTE_NAMES: Readonly<Record<string, string>> = {
-  build: 'Build',
-  hold: 'Hold',
-  'club set-up': 'Club set-up',
-  'ask a clinician': 'Ask a clinician',
-};
+/** The four Routes: what the coaches can agree to do. */
+export const ROUTES = [
+  { key: 'build', name: 'Build', about: 'a lead-side block; hold the swing as it is' },
+  { key: 'hold', name: 'Hold', about: 'no new driver speed work until the retest' },
+  { key: 'club set-up', name: 'Club set-up', about: 'more loft from the club instead of from backing up' },
+  { key: 'ask a clinician', name: 'Ask a clinician', about: 'before anything else changes' },
+] as const;
 
 /** The name of a Route as it is shown. */
-export const routeName = (route: string): string => ROUTE_NAMES[route] ?? route;
+export const routeName = (route: string): string => ROUTES.find(({ key }) => key === route)?.name ?? route;
+
+type State = 'raised' | 'discussed' | 'in hand' | 'cleared' | 'set aside';
+const STATES: readonly State[] = ['raised', 'discussed', 'in hand', 'cleared', 'set aside'];
+
+/** A stored state as one of the five. */
+export const outrunState = (state: string): State => STATES.find((known) => known === state) ?? 'raised';
 
 /** Where an open outrun stands and what it asks next, in words. */
 export function outrunWords({ level, state, raisedOn, levelSince, route, lookAgainOn, mayBeCleared }: Outrun) {
@@ -35,3 +42,6 @@ export function outrunWords({ level, state, raisedOn, levelSince, route, lookAga
 }
 
 const stateName = (state: string): string => `${state.charAt(0).toUpperCase()}${state.slice(1)}`;
+
+/** A stored level as the two that there are. */
+export const levelOf = (level: string): 'look' | 'act' => (level === 'act' ? 'act' : 'look');
