@@ -55,7 +55,7 @@ export function criterionWords({ name, value, interval90 }: Pick<Criterion, 'nam
   const { unit, digits, signed } = CRITERION_WORDS[name];
   const number = value === null ? '' : (signed ? signedNumber : plainNumber)(value, digits);
   return {
-    value: value === null ? 'none' : [number, unit].filter(Boolean).join(' '),
+    value: value === null ? '–' : [number, unit].filter(Boolean).join(' '),
     interval: interval90 ? `(${intervalWords(interval90, digits)})` : null,
   };
 }
