@@ -26,7 +26,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   'middleware.ts': ['auth', 'access', 'http', 'errors'],
   'env.d.ts': ['access'],
   server: ['http', 'jobs', 'db', 'errors'],
-  cli: ['services', 'db', 'errors', 'access', 'domain'],
+  cli: ['services', 'db', 'errors', 'access', 'domain', 'auth'],
   layouts: ['components', 'islands', 'ui', 'domain', 'access', 'styles', 'services'],
   components: ['islands', 'ui', 'domain', 'services'],
   islands: ['ui', 'client', 'schemas', 'domain'],
