@@ -24,7 +24,7 @@ describe('the main job', () => {
     await page.getByRole('heading', { level: 1 }).waitFor();
     const evidence = page.getByRole('table', { name: 'Evidence' });
     for (const label of ['Lead deficit', 'Carry pulling away', 'Demand over capacity', 'Late return', 'Around it']) {
-      await evidence.getByRole('rowheader', { name: label }).waitFor();
+      await evidence.getByRole('rowheader', { name: new RegExp(`^${label}`) }).waitFor();
     }
     await page.getByRole('heading', { name: 'What would clear it' }).waitFor();
     await page.getByRole('heading', { name: 'Before you believe it' }).waitFor();
