@@ -28,7 +28,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   server: ['http', 'jobs', 'db', 'errors'],
   cli: ['services', 'db', 'errors', 'access', 'domain', 'auth'],
   layouts: ['components', 'islands', 'ui', 'domain', 'access', 'styles', 'services'],
-  components: ['islands', 'ui', 'domain', 'services'],
+  components: ['islands', 'ui', 'domain', 'services', 'access'],
   islands: ['ui', 'client', 'schemas', 'domain'],
   ui: ['domain'],
   client: ['schemas', 'domain'],

@@ -68,6 +68,12 @@ export function selectAthletes(trx: Tx) {
             .where('restriction.cleared_at', 'is', null)
             .orderBy('restriction.set_at', 'desc'),
         ).as('restrictions'),
+        jsonArrayFrom(
+          eb
+            .selectFrom('term')
+            .select(['term.name', 'term.starts_on as startsOn', 'term.ends_on as endsOn'])
+            .orderBy('term.starts_on'),
+        ).as('terms'),
       ])
       .where('athlete.left_on', 'is', null)
       .orderBy('athlete.family_name')

@@ -15,6 +15,7 @@ export function listMeasuresTaken(trx: Tx, athleteIds: readonly string[]) {
       'sitting_height_m as sittingHeightM',
       'mass_kg as massKg',
       'state',
+      'asked_reason as askedReason',
     ])
     .where('athlete_id', 'in', [...athleteIds])
     .orderBy('measured_on')

@@ -49,7 +49,3 @@ export function findSquad(trx: Tx, id: string) {
     .where('squad.id', '=', id)
     .executeTakeFirst();
 }
-
-/** Terms of the academy, oldest first. */
-export const listTerms = (trx: Tx) =>
-  trx.selectFrom('term').select(['name', 'starts_on as startsOn', 'ends_on as endsOn']).orderBy('starts_on').execute();

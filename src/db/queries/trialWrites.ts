@@ -13,6 +13,8 @@ export interface StoredTrial {
   attempt: number;
   valueSi: number;
   state: 'valid' | 'asked' | 'void';
+  askedReason: string | null;
+  voidReason: string | null;
 }
 
 /** Every trial of these days. */
@@ -28,6 +30,8 @@ export function listTrialsOfDays(trx: Tx, dayIds: readonly string[]): Promise<St
       'attempt',
       'value_si as valueSi',
       'state',
+      'asked_reason as askedReason',
+      'void_reason as voidReason',
     ])
     .where('testing_day_id', 'in', [...dayIds])
     .execute();

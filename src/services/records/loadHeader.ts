@@ -35,6 +35,7 @@ export interface RecordHeader {
   cautions: Cautions;
   outrun: OpenOutrun | null;
   marks: AthleteRow['marks'];
+  terms: AthleteRow['terms'];
 }
 
 export interface OpenOutrun {
@@ -66,7 +67,7 @@ export async function loadHeader(
 
 /** The header of a row; `growth` oldest first. */
 export function headerOf(athlete: AthleteRow, growth: readonly GrowthRow[], today: string): RecordHeader {
-  const { id, givenName, familyName, squadId, squadName, sex, birthDate, plays, restrictions, marks } = athlete;
+  const { id, givenName, familyName, squadId, squadName, sex, birthDate, plays, restrictions, marks, terms } = athlete;
   return {
     id,
     givenName,
@@ -82,6 +83,7 @@ export function headerOf(athlete: AthleteRow, growth: readonly GrowthRow[], toda
     cautions: { restrictions, growth: growthWarning(growth, sex) },
     outrun: openOutrun(athlete),
     marks,
+    terms,
   };
 }
 

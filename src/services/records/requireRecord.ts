@@ -1,8 +1,7 @@
 import { isStaff, type Viewer } from '#src/access/viewer.ts';
 import { asViewer } from '#src/db/client.ts';
 import { listDriverSessions } from '#src/db/queries/driverSessions.ts';
-import { findOpenOutrunResult, listOutrunEvents } from '#src/db/queries/outrunEvents.ts';
-import { listTerms } from '#src/db/queries/squads.ts';
+import { findOutrunLane } from '#src/db/queries/outrunEvents.ts';
 import { listTestSessions } from '#src/db/queries/testSessions.ts';
 import { seasonSentence } from '#src/domain/record/seasonSentence.ts';
 import { driverSeries, type DriverPoint } from '#src/services/records/driverFigures.ts';
@@ -22,10 +21,10 @@ export function requireRecord(viewer: Viewer, athleteId: string) {
     const { header, growth } = await loadHeader(trx, viewer, athleteId);
     const compared = comparisons(await listTestSessions(trx, [athleteId]), header.leadSide);
     const carry = driverSeries(await listDriverSessions(trx, [athleteId]));
-    const terms = await listTerms(trx);
+    const { terms } = header;
     const strength = pushPerKg(compared, growth);
     const newest = newestDay(compared);
-    const staff = isStaff(viewer);
+    const lane = isStaff(viewer) ? await findOutrunLane(trx, athleteId) : null;
     return {
       header,
       terms,
@@ -33,9 +32,9 @@ export function requireRecord(viewer: Viewer, athleteId: string) {
       strength,
       velocity: velocitySeries(growth),
       newest,
-      sentence: staff ? sentenceOf({ carry, strength, newest, terms, marks: header.marks }) : null,
-      outrunEvents: staff ? await listOutrunEvents(trx, athleteId) : [],
-      outrunResult: staff && header.outrun ? await findOpenOutrunResult(trx, athleteId) : null,
+      sentence: lane ? sentenceOf({ carry, strength, newest, terms, marks: header.marks }) : null,
+      outrunEvents: lane?.events ?? [],
+      outrunResult: lane?.openResult ?? null,
     };
   });
 }
