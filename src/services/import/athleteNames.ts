@@ -46,6 +46,8 @@ export function matchFileName<A extends NamedAthlete>(athletes: readonly A[], pa
     const run = runAt(words, joined(athlete.familyName));
     return run && initialsOf(athlete).some((initial) => words[run.from - 1] === initial || words[run.to] === initial);
   });
+  if (initials.length === 0)
+    return { athlete: null, reason: 'no athlete is named, neither in the file nor in its name' };
   return only(initials, path);
 }
 

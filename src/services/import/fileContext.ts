@@ -16,7 +16,7 @@ export interface FileContext {
  */
 export function fileContext({ comments }: Pick<SourceTable, 'comments'>, above: readonly SourceRow[]): FileContext {
   const entries = [
-    ...comments.flatMap(({ line, text }) => text.split(/[;|,](?=\s|$)/).flatMap((part) => entryOf(part, line))),
+    ...comments.flatMap(({ line, text }) => text.split(/[;|,](?=[^;|,]*[:=])/).flatMap((part) => entryOf(part, line))),
     ...above.flatMap(({ line, cells }) => {
       const filled = cells.filter((cell) => cell !== '');
       const own = filled.flatMap((cell) => (/[:=]\s*\S/.test(cell) ? entryOf(cell, line) : []));

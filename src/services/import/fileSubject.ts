@@ -3,7 +3,7 @@ import { matchFileName, matchName } from '#src/services/import/athleteNames.ts';
 import { dateInName } from '#src/services/import/fileDates.ts';
 import type { KnownAthlete, ReaderSettings } from '#src/services/import/reading.ts';
 import { cellOf, columnOf, type RecognisedTable } from '#src/services/import/recogniseTable.ts';
-import { nameOf } from '#src/services/import/rowContext.ts';
+import { dateAtHead, nameOf } from '#src/services/import/rowContext.ts';
 import { readDate } from '#src/services/import/settleDates.ts';
 
 /** Whose recording a file is, and of what day. */
@@ -19,10 +19,9 @@ export function fileSubject(table: RecognisedTable, settings: ReaderSettings): F
   const match = name === '' ? matchFileName(settings.athletes, table.file) : matchName(settings.athletes, name);
   if (match.athlete === null) return match.reason;
   const cell = row === undefined ? '' : cellOf(row, columnOf(table, 'date'));
-  const written =
-    cell !== '' ? cell : table.context.find('date', 'day', 'recorded on', 'recorded', 'session date', 'test date');
-  const order = cell !== '' ? settings.dateOrder : (settings.dateOrder ?? settings.nameOrder);
-  const recordedOn = (written === null ? null : readDate(written, order)) ?? dateInName(table.file, settings.nameOrder);
+  const order = settings.dateOrder ?? settings.nameOrder;
+  const inRow = cell === '' ? null : readDate(cell, order);
+  const recordedOn = inRow ?? dateAtHead(table, order) ?? dateInName(table.file, settings.nameOrder);
   return recordedOn === null ? 'no date in the file, nor in its name' : { athlete: match.athlete, recordedOn };
 }
 

@@ -120,11 +120,11 @@ function setMeasured(
   if (quantity !== null && unit!.quantity !== quantity) return `${unit!.symbol} is no unit of ${quantity}`;
   const base = quantity === null ? cell.value : toSi(cell.value, unit!);
   if (!inRange(base)) return `${text} is outside ${lowest} to ${highest}`;
-  const against = field === 'headwind' || /\b(head|into|against)\b/i.test(cell.remark);
   if (field === 'temperature') into.temperatureC = base;
   else if (field === 'humidity') into.humidityPct = base;
   else if (field === 'pressure') into.pressurePa = base;
   else if (field === 'altitude') into.altitudeM = base;
-  else into.windMps = against ? -Math.abs(base) : base;
+  else if (/\b(head ?wind|head|into|against)\b/i.test(cell.remark)) into.windMps = 0 - Math.abs(base);
+  else into.windMps = field === 'headwind' ? 0 - base : base;
   return null;
 }

@@ -15,14 +15,7 @@ export interface RecognisedFolder {
 export function recogniseFolder(files: readonly FolderFile[], others: readonly string[]): RecognisedFolder {
   const tables: RecognisedTable[] = [];
   const lines: ReportLine[] = others.map((path) => fileLine(path, 'left out', 'not a table of text'));
-  const seen = new Map<string, string>();
-  for (const { path, bytes, sha256 } of files) {
-    const twin = seen.get(sha256.toString('hex'));
-    if (twin !== undefined) {
-      lines.push(fileLine(path, 'left out', `the same file as ${twin}`));
-      continue;
-    }
-    seen.set(sha256.toString('hex'), path);
+  for (const { path, bytes } of files) {
     try {
       const table = recogniseTable(parseTable(decodeText(bytes, path), path));
       if (table === null) lines.push(fileLine(path, 'refused', 'no row of headings says what this file is'));
@@ -34,7 +27,20 @@ export function recogniseFolder(files: readonly FolderFile[], others: readonly s
       lines.push(unusableLine(path, 'file', error));
     }
   }
+  for (const line of lines)
+    if (line.verdict === 'refused') line.kind = recordingKindBeside(line.file, tables) ?? 'file';
   return { tables, lines };
+}
+
+const FEWEST_NEIGHBOURS = 3;
+
+/** A file that cannot be read, in a folder of nothing but traces or curves, is one of them: it counts as refused. */
+function recordingKindBeside(path: string, tables: readonly RecognisedTable[]): 'traces' | 'curves' | null {
+  const folderOf = (file: string) => file.slice(0, file.lastIndexOf('/') + 1);
+  const beside = tables.filter(({ file }) => folderOf(file) === folderOf(path));
+  const all = (kind: RecognisedTable['kinds'][number]) => beside.every(({ kinds }) => kinds[0] === kind);
+  if (beside.length < FEWEST_NEIGHBOURS) return null;
+  return all('ground trace') ? 'traces' : all('force curve') ? 'curves' : null;
 }
 
 /** A line about a whole file. */

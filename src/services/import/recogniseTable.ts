@@ -23,6 +23,7 @@ export interface Column {
 /** A table whose headings were understood. */
 export interface RecognisedTable {
   file: string;
+  delimiter: SourceTable['delimiter'];
   kinds: readonly TableKind[];
   columns: readonly Column[];
   context: FileContext;
@@ -127,6 +128,7 @@ function withBody(table: SourceTable, { kinds, columns, context, at }: Found): R
   });
   return {
     file: table.file,
+    delimiter: table.delimiter,
     kinds,
     columns: columns.map((column) => ({ ...column, unit: column.unit ?? units[column.index] ?? null })),
     context,

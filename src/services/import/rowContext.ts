@@ -1,5 +1,6 @@
 import { dateInName } from '#src/services/import/fileDates.ts';
 import { matchFileName, matchName, type NameMatch } from '#src/services/import/athleteNames.ts';
+import type { DateOrder } from '#src/domain/units/parseDate.ts';
 import type { KnownAthlete, ReaderSettings } from '#src/services/import/reading.ts';
 import type { SourceRow } from '#src/services/import/parseTable.ts';
 import { cellOf, columnOf, type RecognisedTable } from '#src/services/import/recogniseTable.ts';
@@ -35,16 +36,7 @@ function matchRow(table: RecognisedTable, name: string, athletes: readonly Known
 /** Gives the date of a row: its own column, else the head of the file, else the file's name; or why there is none. */
 export function dateFinder(table: RecognisedTable, { dateOrder, nameOrder }: ReaderSettings) {
   const column = columnOf(table, 'date');
-  const written = table.context.find(
-    'date',
-    'day',
-    'session date',
-    'test date',
-    'tested on',
-    'recorded on',
-    'recorded',
-  );
-  const ofFile = (written === null ? null : readDate(written, dateOrder)) ?? dateInName(table.file, nameOrder);
+  const ofFile = dateAtHead(table, dateOrder) ?? dateInName(table.file, nameOrder);
   return (row: SourceRow): { date: string; reason: null } | { date: null; reason: string } => {
     const text = cellOf(row, column);
     if (text === '') {
@@ -54,6 +46,13 @@ export function dateFinder(table: RecognisedTable, { dateOrder, nameOrder }: Rea
     const date = readDate(text, dateOrder);
     return date === null ? { date: null, reason: dateProblem(text) } : { date, reason: null };
   };
+}
+
+/** The date that the head of a file gives: under a key that speaks of one, else any value that is one. */
+export function dateAtHead({ context }: RecognisedTable, order: DateOrder | null): string | null {
+  const dated = context.entries.filter(({ key }) => /\b(date|day|held|tested|recorded|measured)\b/.test(key));
+  const others = context.entries.filter(({ key }) => !/birth|born|dob|print|export|created/.test(key));
+  return [...dated, ...others].map(({ value }) => readDate(value, order)).find((date) => date !== null) ?? null;
 }
 
 /** Why a text is no date. */

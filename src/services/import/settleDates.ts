@@ -15,13 +15,14 @@ const SERIAL_EPOCH = Date.UTC(1899, 11, 30);
 export function settleDateOrders(tables: readonly RecognisedTable[], paths: readonly string[]) {
   const texts = new Map(tables.map((table) => [table, dateCells(table)]));
   const pooled = (wanted: readonly RecognisedTable[]) => orderByVote(wanted.flatMap((table) => texts.get(table)!));
-  const everything = () => orderByVote([...[...texts.values()].flat(), ...paths.flatMap(datesWritten)]);
-  const forNames = everything();
+  const inNames = paths.flatMap(datesWritten);
+  const everything = orderByVote([...[...texts.values()].flat(), ...inNames]);
+  const forNames = orderByVote(inNames.filter((text) => !/^\d{4}/.test(text))) ?? everything;
   const orderOf = (table: RecognisedTable): DateOrder | null =>
     orderInHeading(table) ??
     orderByVote(texts.get(table) ?? []) ??
     pooled(tables.filter(({ kinds }) => kinds[0] === table.kinds[0])) ??
-    forNames;
+    everything;
   return { orderOf, forNames };
 }
 
@@ -57,5 +58,10 @@ function orderInHeading(table: RecognisedTable): DateOrder | null {
 const dateColumns = ({ columns }: RecognisedTable) =>
   columns.filter(({ field }) => field === 'date' || field === 'birthDate');
 
-const dateCells = (table: RecognisedTable): string[] =>
-  dateColumns(table).flatMap((column) => table.body.map((row) => cellOf(row, column)).filter((cell) => cell !== ''));
+/** The cells of a table's dates, and the dates at its head. */
+const dateCells = (table: RecognisedTable): string[] => [
+  ...dateColumns(table).flatMap((column) => table.body.map((row) => cellOf(row, column)).filter((cell) => cell !== '')),
+  ...table.context.entries
+    .map(({ value }) => value)
+    .filter((value) => /^\d{1,2}[-/. ]\d{1,2}[-/. ]\d{2,4}$/.test(value)),
+];

@@ -16,7 +16,7 @@ export function tableDecimal(table: RecognisedTable, columns: readonly Column[])
     }
     if (cells.length > CELLS_LOOKED_AT) break;
   }
-  return decimalMark(cells) ?? byMost(cells);
+  return decimalMark(cells) ?? byMost(cells) ?? byDelimiter(table, cells);
 }
 
 /** A few cells may be written the other way: then the mark that nearly all of them can be read with. */
@@ -27,4 +27,14 @@ function byMost(cells: readonly string[]): DecimalMark | undefined {
   if (comma === point) return undefined;
   if (Math.max(comma, point) < LEAST_SHARE) return undefined;
   return comma > point ? ',' : '.';
+}
+
+/**
+ * Cells like `1,299` and `202.847` can be read both ways. A table cut by semicolons is so because its commas are decimal
+ * marks; one cut by commas, tabs or bars has points.
+ */
+function byDelimiter({ delimiter }: RecognisedTable, cells: readonly string[]): DecimalMark | undefined {
+  if (cells.length === 0) return undefined;
+  if (delimiter !== ';') return '.';
+  return cells.some((cell) => cell.includes(',')) ? ',' : undefined;
 }

@@ -56,7 +56,7 @@ export async function recordGrowthWithin(
     if (known) {
       if (!sameBody(known, measure)) return refused('other values are already recorded for that day');
       batch.set(key, measure);
-      return { state: known.state, reason: null, fresh: false };
+      return { state: known.state, reason: known.state === 'asked' ? known.askedReason : null, fresh: false };
     }
     const outside = outsideRange(measure);
     if (outside !== null) return refused(outside);

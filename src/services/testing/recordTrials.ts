@@ -145,7 +145,8 @@ async function judgeOfTrials(trx: Tx, trials: readonly NewTrial[], days: Readonl
 function knownTrial(trial: NewTrial, known: StoredTrial, taken: Map<string, NewTrial>): RecordedTrial {
   if (!sameValue(known.valueSi, trial.valueSi)) return refused('another value is already recorded for this trial');
   taken.set(slot(trial), trial);
-  return { state: known.state, reason: trial.voidReason ?? null, fresh: false };
+  const reason = { valid: null, asked: known.askedReason, void: known.voidReason }[known.state];
+  return { state: known.state, reason, fresh: false };
 }
 
 function verdictOn(trial: NewTrial, test: AcademyTest, reference: number | null): RecordedTrial {
