@@ -1,3 +1,4 @@
+import { dayNumber } from '#src/domain/calendar/dayNumber.ts';
 import type { Season, SeasonOutrun, SeasonPoint } from '#src/ui/chart/season/season.ts';
 
 interface Interval {
@@ -47,13 +48,27 @@ const DRAWN = new Set(['raised', 'level up', 'level down', 'cleared', 'set aside
 function lanes(events: readonly OutrunEvent[]): SeasonOutrun[] {
   const ids = [...new Set(events.map(({ outrunId }) => outrunId))];
   return ids.map((id) => ({
-    steps: events
-      .filter(({ outrunId, kind }) => outrunId === id && DRAWN.has(kind))
-      .map(({ on, kind, level }) => {
+    steps: settled(events.filter(({ outrunId, kind }) => outrunId === id && DRAWN.has(kind))).map(
+      ({ on, kind, level }) => {
         const ended = kind === 'cleared' || kind === 'set aside';
         return ended
           ? { on, level: null, word: kind === 'cleared' ? 'Cleared' : 'Set aside' }
           : { on, level: level === 'act' ? ('act' as const) : ('look' as const) };
-      }),
+      },
+    ),
   }));
+}
+
+const SETTLES_WITHIN_DAYS = 14;
+
+/**
+ * Tests and driving of one term come days apart, and the level may move between them: the line shows what it settled
+ * at, and a level that only came back as it was is not drawn again.
+ */
+function settled(events: readonly OutrunEvent[]): OutrunEvent[] {
+  const kept = events.filter((event, i) => {
+    const next = events[i + 1];
+    return !next || next.level === null || dayNumber(next.on) - dayNumber(event.on) > SETTLES_WITHIN_DAYS;
+  });
+  return kept.filter((event, i) => i === 0 || event.level === null || event.level !== kept[i - 1]!.level);
 }
