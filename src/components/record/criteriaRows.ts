@@ -56,6 +56,6 @@ export function criterionWords({ name, value, interval90 }: Pick<Criterion, 'nam
   const number = value === null ? '' : (signed ? signedNumber : plainNumber)(value, digits);
   return {
     value: value === null ? '–' : [number, unit].filter(Boolean).join(' '),
-    interval: interval90 ? `(${intervalWords(interval90, digits)})` : null,
+    interval: interval90 ? intervalWords(interval90, digits) : null,
   };
 }
