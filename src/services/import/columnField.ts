@@ -78,7 +78,7 @@ const FIELDS: readonly [ColumnField, RegExp][] = [
   ['ballSpeed', /\bball ?(speed|velocity|spd)\b|^bs$/],
   ['launch', /^(vertical |vert )?launch( ?angle| ang)?( vertical| vert)?$|^vla$|^launch deg$/],
   ['spin', /^(back ?|total )?spin( ?rate| total| speed)?$|^backspin$/],
-  ['attack', /\battack\b|^aoa$/],
+  ['attack', /\battack\b|^ao ?a$/],
   ['carry', /^carry( ?(distance|dist|length|flat|total))*$|^(ball )?flight distance$|^distance carry$/],
   ['offline', /^(off ?line|lateral|carry side|side carry|deviation|off line distance|side distance|side total)$/],
   ['club', /^club( ?(type|name|used))?$/],
