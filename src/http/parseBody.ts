@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { AppError } from '#src/errors/appError.ts';
+import { AppError, type FieldError } from '#src/errors/appError.ts';
 
 /**
  * The body of a request as JSON, in the shape of `schema` and nothing beside it.
@@ -30,6 +30,17 @@ export async function parseBody<S extends z.ZodType>(request: Request, schema: S
 export function parse<S extends z.ZodType>(value: unknown, schema: S): z.infer<S> {
   const result = schema.safeParse(value);
   if (result.success) return result.data;
-  const fields = result.error.issues.map(({ path, message }) => ({ path: path.join('.'), message }));
-  throw new AppError('invalid', 'Please check the values', fields);
+  throw new AppError('invalid', 'Please check the values', fieldErrors(result.error));
+}
+
+/** Of a body that is wrong all over, the first hundred places say enough. */
+const MOST_ERRORS = 100;
+
+function fieldErrors({ issues }: z.ZodError): FieldError[] {
+  const errors = issues.slice(0, MOST_ERRORS).flatMap((issue) => {
+    const path = issue.path.map(String);
+    if (issue.code !== 'unrecognized_keys') return [{ path: path.join('.'), message: issue.message }];
+    return issue.keys.map((key) => ({ path: [...path, key].join('.'), message: 'There is no such field' }));
+  });
+  return errors.slice(0, MOST_ERRORS);
 }

@@ -52,16 +52,32 @@ const STANDARD_TEMPERATURE_C = 20;
  *   conditions: { temperatureC: 5 } }).shots[0]?.adjustment // → above 1: cold air holds the ball back
  */
 export function carryStandard({ shots, conditions }: CarryStandardInput): CarryStandardResult {
+  return standardSession(shots, standardShots({ shots, conditions }));
+}
+
+/**
+ * The shots alone, in the order given; for callers that take many shots in parts, with `standardSession` at the end.
+ *
+ * @throws {RangeError} as `carryStandard`
+ */
+export function standardShots({ shots, conditions }: CarryStandardInput): StandardisedShot[] {
   if (shots.length === 0) throw new RangeError('carryStandard requires at least one shot, got none');
   const { wind = 0, ...air } = conditions;
   requireFiniteNumber('carryStandard', 'wind', wind, { min: -100, max: 100 });
   const here = { density: airDensity(air).density, wind };
   const standard = { density: airDensity({ temperatureC: STANDARD_TEMPERATURE_C }).density, wind: 0 };
-  const standardised = shots.map((shot) => standardise(shot, here, standard));
+  return shots.map((shot) => standardise(shot, here, standard));
+}
+
+/** The session that shots and their standardised ones make: both medians, and how many shots were left. */
+export function standardSession(
+  shots: readonly CarryShot[],
+  standardised: readonly StandardisedShot[],
+): CarryStandardResult {
   const carries = standardised.flatMap(({ carryStandard: carry }) => (carry === null ? [] : [carry]));
   const left = shots.length - carries.length;
   return {
-    shots: standardised,
+    shots: [...standardised],
     median: median(shots.map(({ carry }) => carry)),
     medianStandard: carries.length === 0 ? null : median(carries),
     reason: left === 0 ? null : `${left} of ${shots.length} shots without a carry at standard conditions`,
