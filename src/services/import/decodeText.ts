@@ -65,7 +65,6 @@ function fromWindows1252(bytes: Uint8Array): string {
 
 /** A control character means a picture, a spreadsheet's own file or a damaged one, never a table of text. */
 function requireText(text: string, file: string): void {
-  // eslint-disable-next-line no-control-regex
   const at = text.search(/[\u0000-\u0008\u000e-\u001f]/);
   if (at !== -1) {
     const before = text.slice(0, at);

@@ -32,15 +32,20 @@ export function timeSeries(table: RecognisedTable): TimeSeries {
   const decimal = tableDecimal(table, timeColumn ? [...columns, timeColumn] : columns);
   const rows = table.body;
   if (rows.length < FEWEST_SAMPLES) unusableFile({ file: table.file }, `only ${rows.length} samples`);
-  const read = (column: Column): Float64Array =>
-    Float64Array.from(rows, (row) => numberAt(table, row, column, decimal));
-  const clock = timeColumn ? clockOf(table, timeColumn, read(timeColumn)) : declaredClock(table);
+  const read = new Map(
+    [...columns, ...(timeColumn ? [timeColumn] : [])].map((column) => [column, new Float64Array(rows.length)]),
+  );
+  // Row by row: the place that is told is the first one.
+  rows.forEach((row, i) => {
+    for (const [column, samples] of read) samples[i] = numberAt(table, row, column, decimal);
+  });
   const channels = columns.map((column) => {
     const isForce = column.unit?.quantity === 'force' || (column.unit === null && !/press/.test(column.heading.name));
     const factor = column.unit?.quantity === 'force' ? column.unit.factor : 1;
     const measure = isForce ? ('force' as const) : ('pressure' as const);
-    return { column, samples: read(column).map((value) => value * factor), measure };
+    return { column, samples: read.get(column)!.map((value) => value * factor), measure };
   });
+  const clock = timeColumn ? clockOf(table, timeColumn, read.get(timeColumn)!) : declaredClock(table);
   return { ...clock, channels };
 }
 
