@@ -11,7 +11,7 @@ export type NameMatch<A> = { athlete: A; reason: null } | { athlete: null; reaso
 
 /**
  * Finds the athlete that a cell names: accents, case and punctuation do not matter, `Novak, Amara`, `Amara Novak` and
- * `Novak Amara` are one, and initials do where only one athlete has them.
+ * `Novak Amara` are one, and one of the two names may be an initial where only one athlete has it.
  *
  * @returns the athlete, or a reason that finishes "refused because …"
  */
@@ -24,14 +24,13 @@ export function matchName<A extends NamedAthlete>(athletes: readonly A[], text: 
   });
   if (full.length > 0) return only(full, text);
   const words = nameWords(text);
-  const initials = athletes.filter((athlete) => {
-    const family = joined(athlete.familyName);
-    return initialsOf(athlete).some(
-      (initial) =>
-        (words.slice(0, -1).join('') === family && words.at(-1) === initial) ||
-        (words[0] === initial && words.slice(1).join('') === family),
-    );
-  });
+  const shortened = (name: string, initials: readonly string[]) =>
+    (words.slice(0, -1).join('') === name && initials.includes(words.at(-1)!)) ||
+    (words.slice(1).join('') === name && initials.includes(words[0]!));
+  const initials = athletes.filter(
+    ({ givenName, familyName }) =>
+      shortened(joined(familyName), initialsOf(givenName)) || shortened(joined(givenName), initialsOf(familyName)),
+  );
   return only(initials, text);
 }
 
@@ -44,7 +43,10 @@ export function matchFileName<A extends NamedAthlete>(athletes: readonly A[], pa
   if (full.length > 0) return only(full, path);
   const initials = athletes.filter((athlete) => {
     const run = runAt(words, joined(athlete.familyName));
-    return run && initialsOf(athlete).some((initial) => words[run.from - 1] === initial || words[run.to] === initial);
+    return (
+      run &&
+      initialsOf(athlete.givenName).some((initial) => words[run.from - 1] === initial || words[run.to] === initial)
+    );
   });
   if (initials.length === 0)
     return { athlete: null, reason: 'no athlete is named, neither in the file nor in its name' };
@@ -55,8 +57,8 @@ export function matchFileName<A extends NamedAthlete>(athletes: readonly A[], pa
 const nameWords = (text: string): string[] => wordsOf(plainLetters(text));
 const joined = (text: string): string => nameWords(text).join('');
 
-function initialsOf({ givenName }: NamedAthlete): string[] {
-  const letters = nameWords(givenName).map((word) => word[0]!);
+function initialsOf(name: string): string[] {
+  const letters = nameWords(name).map((word) => word[0]!);
   return [...new Set([letters[0] ?? '', letters.join('')])].filter((letter) => letter !== '');
 }
 

@@ -2,6 +2,7 @@ import { recogniseTest } from '#src/domain/catalogue/recogniseTest.ts';
 import { wordsOf } from '#src/domain/catalogue/wordsOf.ts';
 import { batteryColumns } from '#src/services/import/batteryColumns.ts';
 import { isBlankCell, readCell } from '#src/services/import/readCell.ts';
+import { readHeading } from '#src/services/import/readHeading.ts';
 import type { Reading, ReaderSettings, Readings } from '#src/services/import/reading.ts';
 import { readSide, sideAndAttempt, storedSide } from '#src/services/import/readSide.ts';
 import type { SourceRow } from '#src/services/import/parseTable.ts';
@@ -130,7 +131,9 @@ const headSide = ({ context }: RecognisedTable) => readSide(context.find('side',
 
 function unitTextOf(table: RecognisedTable, row: SourceRow, column: Column): string | undefined {
   const inRow = cellOf(row, columnOf(table, 'unit'));
-  return inRow !== '' ? inRow : (column.unit?.symbol ?? table.context.find('unit', 'units') ?? undefined);
+  if (inRow !== '') return inRow;
+  const inTest = readHeading(cellOf(row, columnOf(table, 'test'))).unit;
+  return column.unit?.symbol ?? inTest?.symbol ?? table.context.find('unit', 'units') ?? undefined;
 }
 
 /** A remark voids the trial it stands beside; in a row of several trials it must say which. */

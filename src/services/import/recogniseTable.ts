@@ -4,6 +4,8 @@ import type { Unit } from '#src/domain/units/unitTable.ts';
 import { columnField, type ColumnField } from '#src/services/import/columnField.ts';
 import { fileContext, type FileContext } from '#src/services/import/fileContext.ts';
 import type { SourceRow, SourceTable } from '#src/services/import/parseTable.ts';
+import { filledDown } from '#src/services/import/filledDown.ts';
+import { headingCells } from '#src/services/import/headingCells.ts';
 import { readHeading, type Heading } from '#src/services/import/readHeading.ts';
 import { sideAndAttempt, type WrittenSide } from '#src/services/import/readSide.ts';
 
@@ -43,12 +45,13 @@ const UNITLESS = /^(%|-|#|no\.?|n\/a|h:m|yyyy-mm-dd|dd[/.]mm[/.]yyyy|text)$/i;
  */
 export function recogniseTable(table: SourceTable): RecognisedTable | null {
   const candidates = table.rows.slice(0, ROWS_ABOVE_HEADINGS);
-  for (const [i, row] of candidates.entries()) {
-    const columns = columnsOf(row);
+  for (const i of candidates.keys()) {
+    const { cells, last } = headingCells(table.rows, i);
+    const columns = columnsOf(cells);
     const above = table.rows.slice(0, i);
     const context = fileContext(table, above);
     const kinds = kindsOf(columns, context);
-    if (kinds.length > 0) return withBody(table, { kinds, columns, context, at: i });
+    if (kinds.length > 0) return withBody(table, { kinds, columns, context, at: last });
   }
   return null;
 }
@@ -61,7 +64,7 @@ export const columnOf = ({ columns }: Pick<RecognisedTable, 'columns'>, field: C
 export const cellOf = (row: SourceRow, column: Column | undefined): string =>
   column === undefined ? '' : (row.cells[column.index] ?? '');
 
-function columnsOf({ cells }: SourceRow): Column[] {
+function columnsOf(cells: readonly string[]): Column[] {
   const seen = new Set<ColumnField>();
   return cells.map((cell, index) => {
     const heading = readHeading(cell);
@@ -118,7 +121,7 @@ function withBody(table: SourceTable, { kinds, columns, context, at }: Found): R
   const headings = table.rows[at]!.cells.join('\n').toLowerCase();
   const leftOut: { line: number; why: string }[] = [];
   let units: (Unit | null)[] = [];
-  const body = table.rows.slice(at + 1).filter(({ line, cells }, i) => {
+  const body = filledDown(columns, table.rows.slice(at + 1)).filter(({ line, cells }, i) => {
     if (cells.join('\n').toLowerCase() === headings) return !leftOut.push({ line, why: 'the headings again' });
     if (i === 0 && isUnitRow(cells)) {
       units = cells.map((cell) => parseUnit(cell));

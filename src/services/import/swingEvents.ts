@@ -54,7 +54,8 @@ const eventOf = (key: string): GroundEvent | null =>
 const eventWords = (name: GroundEvent): string => name.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 
 function secondsOf(text: string, key: string, factor?: number): number | null {
-  const number = parseNumber(text);
+  // No moment of a swing lies a thousand seconds on: a comma is the decimal mark.
+  const number = parseNumber(text) ?? parseNumber(text, ',');
   if (number === null) return null;
   const unit = number.unit === null ? null : parseUnit(number.unit);
   if (number.unit !== null && unit?.quantity !== 'time') return null;

@@ -15,6 +15,8 @@ describe('matchName', () => {
     ['lukasz obrien orsted', 'lukasz'],
     ['O’BRIEN-ORSTED, Lukasz', 'lukasz'],
     ['V. Okafor', 'vesna'],
+    ['Vesna O.', 'vesna'],
+    ['Anton N', 'anton'],
     ['Okafor V', 'vesna'],
     ['VanDerBerg, Ana Maria', 'ana'],
     ['A. M. van der Berg', null],

@@ -46,6 +46,40 @@ describe('readBattery', () => {
     ]);
   });
 
+  it('reads headings of two and three levels', () => {
+    const two = 'Name;jump;;hop;\n;L1 (cm);R1 (cm);L1 (m);R1 (m)\nAmara Novak;13,6;14;1,3;1,4\n';
+    const three = 'Name,jump cm,,,\n,Left,,Right,\n,1,2,1,2\nAmara Novak,13,14,15,16\n';
+    expect(values(two).map((value) => value?.slice(2))).toEqual([
+      ['jump', 'left', 1, expect.closeTo(0.136, 9)],
+      ['jump', 'right', 1, expect.closeTo(0.14, 9)],
+      ['hop', 'left', 1, 1.3],
+      ['hop', 'right', 1, 1.4],
+    ]);
+    expect(values(three).map((value) => value?.slice(3))).toEqual([
+      ['left', 1, 0.13],
+      ['left', 2, 0.14],
+      ['right', 1, 0.15],
+      ['right', 2, 0.16],
+    ]);
+  });
+
+  it('reads a unit in the test’s own cell, and a name that stands over several rows', () => {
+    const text =
+      'Athlete,Test,Leg,Result\nAmara Novak,Hop (cm),L,130\n,Hop (cm),R,140\n,Hop (cm),R,141\nVesna Okafor,Hop (cm),L,120\n,Hop (cm),L,121\n,Hop (cm),R,125\n';
+    expect(values(text).map((value) => [value?.[0], value?.[5]])).toEqual([
+      ['amara', 1.3],
+      ['amara', expect.closeTo(1.4, 9)],
+      ['amara', 1.41],
+      ['vesna', 1.2],
+      ['vesna', 1.21],
+      ['vesna', 1.25],
+    ]);
+    // Where most rows have a name, a row without one is nobody's.
+    expect(values('Athlete,Test,Leg,Result\nAmara Novak,Hop (cm),L,130\n,Hop (cm),R,140\n')[1]).toBe(
+      'no athlete is named',
+    );
+  });
+
   it('mirrors lead and trail by what the child plays', () => {
     const text = 'Name,lead jump 1 (cm)\nAmara Novak,14\nVesna Okafor,15\n';
     expect(values(text)).toEqual([

@@ -50,6 +50,11 @@ describe('readGroundTrace', () => {
     ],
   ])('refuses', (text, reason) => expect(trace(text)).toBe(reason));
 
+  it('reads moments with a decimal comma', () => {
+    const text = `${EVENTS.replaceAll('.', ',')}\ntime s;left Fz N;right Fz N\n${samples.replaceAll(',', ';').replaceAll('.', ',')}`;
+    expect(trace(text)).toMatchObject({ events: { leadArmParallel: 1.13, impact: 1.24 }, sampleRateHz: 500 });
+  });
+
   it('refuses a trace of nobody and of no day', () => {
     const text = `${EVENTS}\ntime s,left Fz N,right Fz N\n${samples}`;
     expect(trace(text, 'swing3_2026-01-21.csv')).toBe('no athlete is named, neither in the file nor in its name');
