@@ -39,7 +39,7 @@ export interface MethodPage {
   sources: readonly { of: string; source: string; tag: SourceTag }[];
   limits: readonly string[];
   fields: readonly FormField[];
-  /** Names and units of the response's figures by path; `*` stands for any index. */
+  /** Names and units of the response's figures by path; `*` stands for any index, an empty name leaves a part out. */
   outputs: Readonly<Record<string, string>>;
   example: { says: string; request: object; published: readonly PublishedValue[] };
 }

@@ -70,7 +70,7 @@ export const flightPage: MethodPage = {
     apex: 'Highest point, m',
     landingDeg: 'Angle of descent, °',
     landingSpeed: 'Speed at landing, m/s',
-    path: 'Path',
+    path: '',
   },
   example: {
     says: 'A robot’s drive: 176 mph, 10°, 2 520 rpm, in air of 1.194 kg/m³. 240.35 m are 262.85 yd.',

@@ -1,3 +1,4 @@
+import { CRITERION_LABELS } from '#src/domain/outrun/criterionLabels.ts';
 import { DEFAULT_POLICY } from '#src/domain/outrun/policy.ts';
 import { typicalErrorPct } from '#src/domain/reliability/typicalErrorPct.ts';
 import type { FormField } from '#src/schemas/method/form/formField.ts';
@@ -212,6 +213,8 @@ export const outrunPage: MethodPage = {
   ],
   fields,
   outputs: {
+    ...CRITERION_LABELS,
+    policy: '',
     level: 'Level',
     points: 'Points',
     gate: 'Gate',
