@@ -44,7 +44,8 @@ async function consume(limit: RateLimiterPostgres, key: string): Promise<void> {
     await limit.consume(keyOf(key), 1);
   } catch (error) {
     if (!(error instanceof RateLimiterRes)) throw error;
-    throw new AppError('too-many', `Too many tries. Try again in ${Math.ceil(error.msBeforeNext / 60_000)} min.`);
+    const seconds = Math.ceil(error.msBeforeNext / 1000);
+    throw new AppError('too-many', `Too many tries. Try again in ${Math.ceil(seconds / 60)} min.`, [], seconds);
   }
 }
 

@@ -13,6 +13,8 @@ export class AppError extends Error {
     readonly code: AppErrorCode,
     message: string,
     readonly fields: readonly FieldError[] = [],
+    /** Seconds after which it may work, where that is known. */
+    readonly retryAfterS?: number,
   ) {
     super(message);
     this.name = 'AppError';

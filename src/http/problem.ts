@@ -46,7 +46,10 @@ export function statusOf(error: unknown): number {
 /** The answer to a thrown thing. An unknown error says nothing of itself. */
 export function problemOf(error: unknown): Response {
   const status = statusOf(error);
-  if (error instanceof AppError) return problem(status, error.message, { errors: error.fields });
+  if (error instanceof AppError) {
+    const { message, fields, retryAfterS } = error;
+    return problem(status, message, { errors: fields, ...(retryAfterS === undefined ? {} : { retryAfterS }) });
+  }
   return status === 503 ? problem(503, 'Please try again in a moment', { retryAfterS: 3 }) : problem(500);
 }
 

@@ -120,7 +120,11 @@ async function calculatorOperation(name: string, { schema, run, page }: Calculat
       },
       '413': { description: 'The body is over 2 MB', content: PROBLEM },
       '422': { description: 'Please check the values', content: PROBLEM },
-      '429': { description: 'Too many requests from this address', content: PROBLEM },
+      '429': {
+        description: 'Too many requests from this address',
+        headers: { 'Retry-After': { description: 'Seconds to wait', schema: { type: 'integer' } } },
+        content: PROBLEM,
+      },
     },
   };
 }
