@@ -5,7 +5,7 @@ import { isCalendarDate } from '#src/domain/calendar/dayNumber.ts';
 export const calendarDate = () =>
   z
     .string({ error: 'Give a date as YYYY-MM-DD' })
-    .regex(/^\d{4}-\d{2}-\d{2}$/, 'Give a date as YYYY-MM-DD')
+    .regex(/^\d{4}-\d{2}-\d{2}$/, { message: 'Give a date as YYYY-MM-DD', abort: true })
     .refine(
       (text) => {
         const [year, month, day] = text.split('-').map(Number);

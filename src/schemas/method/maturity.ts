@@ -10,7 +10,7 @@ export const maturityRequest = z
     sittingHeight: aboveZero(300).optional(),
     mass: aboveZero(1000).optional(),
   })
-  .refine(({ stature, sittingHeight = 0 }) => sittingHeight < stature, {
+  .refine(({ stature, sittingHeight }) => sittingHeight === undefined || sittingHeight < stature, {
     path: ['sittingHeight'],
     message: 'Give a sitting height below the stature',
   });
