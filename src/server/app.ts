@@ -6,6 +6,7 @@ import { compressed } from '#src/server/compressed.ts';
 import { securityHeaders } from '#src/server/headers.ts';
 import { healthz, readyz } from '#src/server/health.ts';
 import { hostGuard } from '#src/server/hostGuard.ts';
+import { jsonOnly } from '#src/server/jsonOnly.ts';
 import { lastResort } from '#src/server/lastResort.ts';
 import type { Log } from '#src/server/log.ts';
 import { originGuard } from '#src/server/originGuard.ts';
@@ -48,6 +49,7 @@ export function createApp({ settings, log, pages, clientFolder, ready }: AppPart
   app.use(proxyHeaders(settings.trustedProxies, https));
   app.use(originGuard(settings.origins));
   app.use(bodyCap);
+  app.use(jsonOnly);
   app.get('/healthz', healthz);
   app.get('/readyz', readyz(ready, log));
   app.use(compressed());

@@ -2,9 +2,7 @@ import { requireFiniteList } from '#src/domain/statistics/requireFiniteList.ts';
 import { leastSquares, type LeastSquares } from '#src/domain/trend/leastSquares.ts';
 import { mannKendall, type Alternative, type MannKendall } from '#src/domain/trend/mannKendall.ts';
 import { theilSen, type TheilSen } from '#src/domain/trend/theilSen.ts';
-
-/** Most points a trend takes: every pair is looked at, two million of them here. */
-export const TREND_MOST_POINTS = 2000;
+import { TREND_MOST_POINTS } from '#src/domain/trend/trendMostPoints.ts';
 
 /** One y for each x, any units, any order. */
 export interface TrendInput {

@@ -60,7 +60,13 @@ export function Calculator({ name, fields, labels, start }: Props) {
             isOpen={members.some((field) => !field.optional || start.texts[field.path] || errorOf(field))}
           >
             {members.map((field) => (
-              <CalculatorField key={field.path} field={field} register={form.register} error={errorOf(field)} />
+              <CalculatorField
+                key={field.path}
+                field={field}
+                register={form.register}
+                error={errorOf(field)}
+                text={start.texts[field.path] ?? ''}
+              />
             ))}
           </Section>
         ))}

@@ -6,6 +6,8 @@ interface Props {
   field: FormField;
   register: UseFormRegister<Record<string, string>>;
   error: string | undefined;
+  /** What stands in it at first, before any script runs too. */
+  text: string;
 }
 
 const YES_OR_NO = [
@@ -14,7 +16,7 @@ const YES_OR_NO = [
 ];
 
 /** The control of one field: a line, some lines, or a choice. */
-export function CalculatorField({ field, register, error }: Props) {
+export function CalculatorField({ field, register, error, text }: Props) {
   const { label, hint, unit, optional } = field;
   const name = controlName(field);
   const common = {
@@ -22,6 +24,7 @@ export function CalculatorField({ field, register, error }: Props) {
     label,
     name,
     error,
+    defaultValue: text,
     ...(hint ? { hint } : {}),
     ...(unit ? { unit } : {}),
     ...(optional ? { optional } : {}),

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { TREND_MOST_POINTS } from '#src/domain/trend/trend.ts';
+import { TREND_MOST_POINTS } from '#src/domain/trend/trendMostPoints.ts';
 import { numberList } from '#src/schemas/method/lists.ts';
 import { oneOf } from '#src/schemas/method/numbers.ts';
 

@@ -10,49 +10,56 @@ interface Props {
 /** A calculator's figures, one a row, with the published ones beside them where there are some. */
 export function FigureTable({ caption, rows, published = [] }: Props) {
   const beside = (path: string) => published.filter((one) => one.path === path || one.path.startsWith(`${path}.`));
+  const compares = published.length > 0;
   return (
-    <div className="scroller" role="region" tabIndex={0} aria-label={caption}>
-      <table className="figures table">
-        <caption>{caption}</caption>
-        <thead>
-          <tr>
-            <th scope="col">Figure</th>
+    <table className="stack figures table">
+      <caption>{caption}</caption>
+      <thead>
+        <tr>
+          <th scope="col">Figure</th>
+          <th scope="col" className="n">
+            Worked out
+          </th>
+          {compares && (
             <th scope="col" className="n">
-              Worked out
+              Expected
             </th>
-            {published.length > 0 && (
-              <th scope="col" className="n">
-                Expected
-              </th>
-            )}
-            {published.length > 0 && <th scope="col">From</th>}
-          </tr>
-        </thead>
-        <tbody>
-          {rows.map(({ path, label, lines, numeric }) => (
+          )}
+          {compares && <th scope="col">From</th>}
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map(({ path, label, lines, numeric }) => {
+          const expected = beside(path);
+          return (
             <tr key={path}>
               <th scope="row">{label}</th>
-              <td className={numeric || lines.length === 0 ? 'n' : 'words'}>
+              <td className={numeric || lines.length === 0 ? 'n' : 'words'} data-label="Worked out">
                 {lines.length === 0 ? <None /> : lines.map((line) => <div key={line}>{line}</div>)}
               </td>
-              {published.length > 0 && (
-                <td className="n">
-                  {beside(path)
-                    .map(({ value }) => (value === null ? 'none' : said(value)))
-                    .join(' to ')}
+              {compares && (
+                <td className="n" data-label="Expected">
+                  {expected.map(({ value }) => said(value)).join(' to ')}
                 </td>
               )}
-              {published.length > 0 && <td>{beside(path)[0]?.source}</td>}
+              {compares && (
+                <td className="from" data-label="From">
+                  {expected[0]?.source}
+                </td>
+              )}
             </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
+          );
+        })}
+      </tbody>
+    </table>
   );
 }
 
-const said = (value: number | string | boolean): string =>
-  typeof value === 'number' ? figureText(value) : typeof value === 'boolean' ? (value ? 'yes' : 'no') : value;
+function said(value: number | string | boolean | null): string {
+  if (value === null) return 'none';
+  if (typeof value === 'number') return figureText(value);
+  return typeof value === 'boolean' ? (value ? 'yes' : 'no') : value;
+}
 
 function None() {
   return (

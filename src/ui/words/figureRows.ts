@@ -59,8 +59,8 @@ function linesOf(value: unknown): string[] | null {
 }
 
 /**
- * A figure to seven digits, enough to check it against a book.
+ * A figure to eight digits, enough to check it against a book.
  *
- * @example figureText(-10.714285714) // → '−10.71429'
+ * @example figureText(-10.714285714) // → '−10.714286'
  */
-export const figureText = (value: number): string => String(Number(value.toPrecision(7))).replace('-', '−');
+export const figureText = (value: number): string => String(Number(value.toPrecision(8))).replace('-', '−');

@@ -139,3 +139,30 @@ describe('answers', () => {
     ]);
   });
 });
+
+describe('the calculators', () => {
+  it.each(['text/plain', 'application/x-www-form-urlencoded', 'multipart/form-data; boundary=a', ''])(
+    'answer 415 as a problem to a body of type "%s"',
+    async (type) => {
+      reached.length = 0;
+      const answer = await fetch(`${site.origin}/api/method/asymmetry`, {
+        method: 'POST',
+        headers: type === '' ? {} : { 'content-type': type },
+        body: new TextEncoder().encode('{}'),
+      });
+      expect(answer.status).toBe(415);
+      expect(answer.headers.get('content-type')).toMatch(/^application\/problem\+json/);
+      expect(await answer.json()).toMatchObject({ status: 415, errors: [{ path: '' }] });
+      expect(reached).toEqual([]);
+    },
+  );
+
+  it('are asked as JSON by a program without an Origin', async () => {
+    const answer = await fetch(`${site.origin}/api/method/asymmetry`, {
+      method: 'POST',
+      headers: { 'content-type': 'application/json; charset=utf-8' },
+      body: '{}',
+    });
+    expect(answer.status).toBe(200);
+  });
+});

@@ -20,7 +20,7 @@ function TraceSvg({ trace, width, height }: { trace: Trace; width: number; heigh
   const yTicks = niceTicks(Math.min(0, least(ys)), Math.max(greatest(ys), trueShape ? (xTo - xFrom) / 5 : 0), 4);
   const xTicks = niceTicks(xFrom, xTo, width > 500 ? 6 : 4).filter((tick) => tick >= xFrom && tick <= xTo);
   const digits = decimalsOf(yTicks);
-  const left = 8 + Math.max(...yTicks.map((tick) => textWidth(plainNumber(tick, digits), FONT)));
+  const left = 12 + Math.max(...yTicks.map((tick) => textWidth(plainNumber(tick, digits), FONT)));
   const labelled = lines.some(({ label }) => label);
   const right = width - (labelled ? 8 + Math.max(...lines.map(({ label = '' }) => textWidth(label, FONT))) : 4);
   const x = linearScale([xFrom, xTo], [left, right]);
@@ -29,7 +29,7 @@ function TraceSvg({ trace, width, height }: { trace: Trace; width: number; heigh
     width,
     FONT,
   );
-  const top = 20 + ROW * placed.reduce((most, { row }) => Math.max(most, row + 1), 0);
+  const top = 32 + ROW * placed.reduce((most, { row }) => Math.max(most, row + 1), 0);
   const bottom = height - 22;
   const y = linearScale([yTicks[0]!, yTicks.at(-1)!], [bottom, top]);
   return (
@@ -53,8 +53,8 @@ function TraceSvg({ trace, width, height }: { trace: Trace; width: number; heigh
       ))}
       {placed.map(({ x: at, label, row, anchor }) => (
         <g key={`${label} ${at}`}>
-          <path className="trace-mark" d={`M${at},${20 + ROW * row}V${bottom}`} />
-          <text x={at + (anchor === 'start' ? 4 : -4)} y={16 + ROW * row + FONT} textAnchor={anchor}>
+          <path className="trace-mark" d={`M${at},${23 + ROW * row}V${bottom}`} />
+          <text x={at + (anchor === 'start' ? 4 : -4)} y={21 + ROW * row + FONT} textAnchor={anchor}>
             {label}
           </text>
         </g>
