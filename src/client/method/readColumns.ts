@@ -52,9 +52,11 @@ function separatorOf(lines: readonly string[]): string | RegExp {
   const commas = (line: string) => (line.match(/,/g) ?? []).length;
   if (samples.some((line) => commas(line) > 1 || (line.includes(',') && line.includes('.')))) return ',';
   if (samples.every((line) => commas(line) === 0) || samples.some((line) => /\S\s+\S/.test(line.trim()))) return /\s+/;
-  // One comma a line: it parts two columns if the heading has one too, or if what stands before it counts up.
+  // One comma a line: it parts two columns if the heading has one too, or if what stands before it counts up
+  // from 0 or 1.
   const before = samples.map((line) => Number(line.split(',')[0]));
-  const countsUp = before.length > 2 && before.every((value, i) => i === 0 || value > before[i - 1]!);
+  const step = (before[1] ?? 0) - before[0]!;
+  const countsUp = before[0]! <= 1 && step > 0 && before.every((value, i) => value === before[0]! + i * step);
   return countsUp || (first > 0 && lines[first - 1]!.includes(',')) ? ',' : /\s+/;
 }
 
