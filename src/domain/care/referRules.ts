@@ -1,6 +1,6 @@
 /** Stands beside the rules wherever they are shown. */
 export const REFER_RULES_NOTE =
-  'Standard practice in sports medicine, written from memory: text to be verified by a person before families see it. It helps to decide whom to ask; it does not diagnose.';
+  'Standard practice in sports medicine, written from memory and still to be verified by a person trained in it. It helps to decide whom to ask; it does not diagnose.';
 
 /** When to see a doctor or physiotherapist. `urgent`: the same day. */
 export interface ReferRule {

@@ -26,6 +26,15 @@ export interface PublishedValue {
   source: string;
 }
 
+/** A table of words on a calculator's page; the first cell of a row names it. */
+interface MethodTable {
+  title: string;
+  /** A sentence above it. */
+  says: string;
+  columns: readonly string[];
+  rows: readonly (readonly string[])[];
+}
+
 /** The words of one calculator's page. */
 export interface MethodPage {
   title: string;
@@ -36,6 +45,8 @@ export interface MethodPage {
   purpose: readonly string[];
   /** Formulas as TeX, each with the words that say what it is. */
   formulas: readonly { says: string; tex: string }[];
+  /** What does not fit into a formula. */
+  tables?: readonly MethodTable[];
   sources: readonly { of: string; source: string; tag: SourceTag }[];
   limits: readonly string[];
   fields: readonly FormField[];

@@ -38,11 +38,11 @@ export const asymmetryPage: MethodPage = {
   ],
   sources: [
     {
-      of: 'Eleven of the indices',
-      source:
-        'Collected by Bishop and others 2016, Strength and Conditioning Journal 38(6):27–32; their worked table (25 against 20) is from memory',
-      tag: 'memory',
+      of: 'Nine of the indices, collected',
+      source: 'Bishop and others 2016, Strength and Conditioning Journal 38(6):27–32',
+      tag: 'read',
     },
+    { of: 'Their worked table, 25 against 20', source: 'The same paper', tag: 'memory' },
     {
       of: 'A difference counts only beyond the limbs’ own variation',
       source: 'Exell and others 2012, Journal of Biomechanics 45:1108–11',
@@ -51,6 +51,11 @@ export const asymmetryPage: MethodPage = {
     {
       of: 'Per cent of the larger leg for one-legged tests',
       source: 'Bishop and others 2018, Strength and Conditioning Journal 40(4):1–6',
+      tag: 'memory',
+    },
+    {
+      of: 'Lines of 5 to 15 % are arbitrary, and depend on task, measure and person',
+      source: 'Afonso and others 2022, Symmetry',
       tag: 'read',
     },
     { of: 'Gait symmetry index', source: 'Robinson 1987, as printed in BMC Sports Science 2021, 13:128', tag: 'read' },

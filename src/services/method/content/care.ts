@@ -1,4 +1,5 @@
 import { CARE_FOOTER } from '#src/domain/care/careFooter.ts';
+import { REFER_RULES, REFER_RULES_NOTE } from '#src/domain/care/referRules.ts';
 import type { MethodPage } from '#src/services/method/methodPage.ts';
 
 export const carePage: MethodPage = {
@@ -23,6 +24,14 @@ export const carePage: MethodPage = {
       tex: String.raw`\text{pain} > 5 \Rightarrow \text{stop}, \qquad 3 \le \text{pain} \le 5 \Rightarrow \text{reduce}`,
     },
   ],
+  tables: [
+    {
+      title: 'When to see a clinician',
+      says: REFER_RULES_NOTE,
+      columns: ['Sign', 'How soon'],
+      rows: REFER_RULES.map(({ sentence, urgent }) => [sentence, urgent ? 'the same day' : 'soon']),
+    },
+  ],
   sources: [
     {
       of: 'Pain lines of adults',
@@ -35,7 +44,7 @@ export const carePage: MethodPage = {
       source: 'International Journal of Sports Physical Therapy, imaging study',
       tag: 'read',
     },
-    { of: 'Night pain, numbness, pain that changes the swing', source: 'Usual reasons to refer', tag: 'memory' },
+    { of: 'Signs to refer on', source: 'Standard practice in sports medicine', tag: 'memory' },
   ],
   limits: [
     'Not validated in juniors, and not for backs. It errs on the side of stopping.',

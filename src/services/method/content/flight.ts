@@ -34,7 +34,8 @@ export const flightPage: MethodPage = {
   limits: [
     'Fitted to drivers at full speed (Reynolds number 7·10⁴ to 2.1·10⁵, spin ratio .08 to .2). A junior’s launch is often outside, and the formula is then continued.',
     'No side spin, no roll, level ground, steady wind.',
-    'Wind against costs more than the same wind behind gives.',
+    'At full speed a wind against costs more than the same wind behind gives.',
+    'For slow balls launched low the model turns round: below about 45 m/s it lets a wind against, or colder air, carry the ball further, since lift then outweighs drag. Whether real balls do so has not been measured here.',
     'Cold balls and clothes cost more than the cold air alone.',
   ],
   fields: [

@@ -7,11 +7,11 @@ export const growthCentilePage: MethodPage = {
   group: 'Growth',
   sentence: 'Where a child’s height, weight or body-mass index stands in a published reference.',
   purpose: [
-    'A reference gives for each age a median M, a spread S and a skewness L. With them a measure becomes a standard score and a centile. The product uses the charts of the US Centers for Disease Control and Prevention of 2000, to see a child leave its own channel, never to rank children.',
+    'A reference gives for each age a median M, a spread S and a skewness L. With them a measure becomes z, the number of standard deviations from the median, and a centile. The product uses the charts of the US Centers for Disease Control and Prevention of 2000, to see a child leave its own channel, never to rank children.',
   ],
   formulas: [
     {
-      says: 'Standard score',
+      says: 'Standard deviations from the median',
       tex: raw`z = \frac{(X/M)^L - 1}{L\,S}, \qquad z = \frac{\ln(X/M)}{S}\ \text{ where } L = 0`,
     },
     { says: 'Centile', tex: raw`100\,\Phi(z)` },
@@ -24,7 +24,7 @@ export const growthCentilePage: MethodPage = {
       tag: 'read',
     },
     { of: 'The LMS method', source: 'Cole and Green 1992, Statistics in Medicine 11:1305–19', tag: 'memory' },
-    { of: 'Scores of the examples', source: 'Worked out from the printed rows', tag: 'recomputed' },
+    { of: 'z of the example', source: 'Worked out from the printed rows', tag: 'recomputed' },
   ],
   limits: [
     'The reference is of children in the United States before 2000; other countries have their own. Give L, M and S to use another.',
@@ -62,7 +62,7 @@ export const growthCentilePage: MethodPage = {
     { path: 'lms.m', label: 'M', kind: 'number', optional: true, section: 'Or by another reference' },
     { path: 'lms.s', label: 'S', kind: 'number', optional: true, section: 'Or by another reference' },
   ],
-  outputs: { l: 'L', m: 'M', s: 'S', z: 'Standard score', centile: 'Centile' },
+  outputs: { l: 'L', m: 'M', s: 'S', z: 'Standard deviations from the median, z', centile: 'Centile' },
   example: {
     says: 'A boy of 120.5 months, 145 cm.',
     request: { measure: 'stature', sex: 'male', ageMonths: 120.5, value: 145 },

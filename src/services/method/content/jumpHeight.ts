@@ -18,8 +18,8 @@ export const jumpHeightPage: MethodPage = {
     { of: 'Both heights', source: 'Motion of a thrown body', tag: 'recomputed' },
     {
       of: 'Modified reactive strength index',
-      source: 'As in McMahon and others 2018, Strength and Conditioning Journal 40(4):96–106',
-      tag: 'read',
+      source: 'Defined so wherever it is used',
+      tag: 'practice',
     },
     {
       of: 'Time in the air gives 1 to 2 cm more than the impulse',

@@ -12,7 +12,7 @@ export const maturityPage: MethodPage = {
   ],
   formulas: [
     {
-      says: 'Mirwald, boys (lengths in cm, mass in kg, age A in years, L leg length, B sitting height, H height). The last term is a percentage',
+      says: 'Mirwald, boys (age A in years; height H, sitting height B and leg length L = H − B in cm; mass W in kg). The last term is a percentage',
       tex: raw`-9.236 + 0.0002708\,LB - 0.001663\,AL + 0.007216\,AB + 0.02292\cdot\frac{100\,W}{H}`,
     },
     {
@@ -20,8 +20,8 @@ export const maturityPage: MethodPage = {
       tex: raw`-9.376 + 0.0001882\,LB + 0.0022\,AL + 0.005841\,AB - 0.002658\,AW + 0.07693\cdot\frac{100\,W}{H}`,
     },
     {
-      says: 'Moore, boys with sitting height; boys without; girls',
-      tex: raw`-8.128741 + 0.0070346\,AB, \quad -7.999994 + 0.0036124\,AH, \quad -7.709133 + 0.0042232\,AB`,
+      says: 'Moore, boys from sitting height; boys from height; girls from height',
+      tex: raw`-8.128741 + 0.0070346\,AB, \quad -7.999994 + 0.0036124\,AH, \quad -7.709133 + 0.0042232\,AH`,
     },
     {
       says: 'Fransen, boys only: a ratio r of the age to the age at the peak',

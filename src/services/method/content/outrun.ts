@@ -1,7 +1,9 @@
 import { CRITERION_LABELS } from '#src/domain/outrun/criterionLabels.ts';
-import { DEFAULT_POLICY } from '#src/domain/outrun/policy.ts';
+import { DEFAULT_POLICY, type OutrunPolicy } from '#src/domain/outrun/policy.ts';
 import { typicalErrorPct } from '#src/domain/reliability/typicalErrorPct.ts';
 import type { FormField } from '#src/schemas/method/form/formField.ts';
+import { outrunTables } from '#src/services/method/content/outrunTables.ts';
+import { POLICY_LABELS } from '#src/services/method/content/policyLabels.ts';
 import type { MethodPage } from '#src/services/method/methodPage.ts';
 
 const raw = String.raw;
@@ -148,7 +150,7 @@ const fields: FormField[] = [
   number('context.driverBallsChangePct', 'Driver balls on the week before', S.around, '%'),
   ...Object.entries(DEFAULT_POLICY).map(([key, value]): FormField => ({
     path: `policy.${key}`,
-    label: key,
+    label: POLICY_LABELS[key as keyof OutrunPolicy],
     kind: 'number',
     optional: true,
     section: S.policy,
@@ -163,7 +165,8 @@ export const outrunPage: MethodPage = {
     'Whether a driver strategy asks more of the lead leg than it can give yet: our own rule, with its evidence.',
   purpose: [
     'An outrun is a question between two coaches. Eight criteria look at the same athlete: one at what the lead leg can do, two compare the driver with it, one looks at the strategy, and four are shown without counting. Each answers not met, met, strong or cannot say.',
-    'A level needs the gate: a lead deficit together with a comparing criterion. A deficit alone, or a deficit with a style, raises nothing. Look (gate and 3 points) asks both coaches to talk before the next block. Act (gate and 5 points, or 4 where the deficit is strong and a comparing criterion is worth 2) asks for a Route within a week.',
+    'A level needs the gate: a lead deficit together with a comparing criterion. A deficit alone, or a deficit with a style, raises nothing. Look (gate and 3 points) asks both coaches to talk before the next block. Act (gate and 5 points, or 4 where the deficit is strong and a comparing criterion is still worth 2) asks for a Route within a week and no new driver speed work until then.',
+    'Once raised it stays. It may be cleared after two judgements running without a level and with at most one point, made from two different testing days; people decide.',
   ],
   formulas: [
     {
@@ -184,11 +187,12 @@ export const outrunPage: MethodPage = {
       tex: raw`\bar\Delta < -\max(\mathrm{TE}, 5)`,
     },
   ],
+  tables: outrunTables,
   sources: [
     { of: 'The rule, its thresholds and its levels', source: 'Marram; tuned on a simulated academy', tag: 'proposal' },
     {
-      of: 'The lead foot at lead arm parallel drives club speed',
-      source: 'Han and others 2019, Sports Biomechanics 18:115–34',
+      of: 'Peak forces under the lead foot go with club speed, and loading it near lead arm parallel matters most',
+      source: 'Han and others 2019, Sports Biomechanics 18:115–34 (63 men of handicap 3 or better)',
       tag: 'read',
     },
     {
@@ -208,7 +212,7 @@ export const outrunPage: MethodPage = {
     'No published cut-off exists, and nothing here was validated in children. Figures of how often it is right come from our simulated academy.',
     'In that academy a large real deficit with ordinary carry looked like an early outrun in 17 to 26 % of such athletes within a year.',
     'It cannot see: an outrun without a lead deficit, deficits under about 5 %, the first term, excess carry under 3 to 4 %.',
-    'Without force plates the demand cannot be measured, and outruns are found a year later on average.',
+    'Without force plates the demand cannot be measured, and outruns are found later or not at all: see the simulated figures.',
     'No flag does not mean safe. The word Stop never comes from here, but from Care.',
   ],
   fields,

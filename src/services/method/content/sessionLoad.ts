@@ -30,7 +30,7 @@ export const sessionLoadPage: MethodPage = {
   ],
   limits: [
     'There is no cut-off for children: compare an athlete with their own weeks.',
-    'Half of the published copies use the other standard deviation (÷ 7): monotony then differs by 8 %.',
+    'The standard deviation here divides by six. Where it divides by seven, monotony comes out 8 % higher: ask before comparing.',
     'Driver balls belong on a line of their own: minutes do not count them.',
   ],
   fields: days.map((label, i) => ({
