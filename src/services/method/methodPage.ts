@@ -31,7 +31,7 @@ interface MethodTable {
   title: string;
   /** A sentence above it. */
   says: string;
-  columns: readonly string[];
+  columns: readonly { header: string; numeric?: boolean }[];
   rows: readonly (readonly string[])[];
 }
 

@@ -5,6 +5,17 @@ export interface FigureRow {
   /** One line, or a line each; empty where there is no figure. */
   lines: string[];
   numeric: boolean;
+  /** Set for a figure of one part of a list, as of one shot. */
+  part?: FigurePart;
+}
+
+/** Which part of which list a figure belongs to, and as what. */
+export interface FigurePart {
+  list: string;
+  index: number;
+  /** Of the part: its own, or its number. */
+  name: string;
+  figure: string;
 }
 
 const MOST_LISTED = 30;
@@ -16,23 +27,29 @@ const MOST_LISTED = 30;
  */
 export function figureRows(answer: object, labels: Readonly<Record<string, string>>): FigureRow[] {
   const { reason: _, ...figures } = answer as Record<string, unknown>;
-  return rowsOf(figures, '', '', labels);
+  return rowsOf(figures, '', undefined, labels);
 }
 
 type Labels = Readonly<Record<string, string>>;
+type Place = Omit<FigurePart, 'figure'>;
 
-function rowsOf(value: unknown, path: string, prefix: string, labels: Labels): FigureRow[] {
+function rowsOf(value: unknown, path: string, within: Place | undefined, labels: Labels): FigureRow[] {
   const named = labels[path] ?? labels[path.replace(/\.\d+(?=\.|$)/g, '.*')];
   if (named === '') return [];
   const lines = linesOf(value);
   if (lines !== null) {
-    const label = `${prefix}${named ?? path.split('.').at(-1)!}`;
-    return [{ path, label, lines, numeric: typeof value === 'number' || isNumbers(value) }];
+    const figure = named ?? path.split('.').at(-1)!;
+    const row = { path, lines, numeric: typeof value === 'number' || isNumbers(value) };
+    return [
+      within ? { ...row, label: `${within.name}: ${figure}`, part: { ...within, figure } } : { ...row, label: figure },
+    ];
   }
   return Object.entries(value as object).flatMap(([key, part]) => {
     if (key === 'name') return [];
     const below = path === '' ? key : `${path}.${key}`;
-    return rowsOf(part, below, Array.isArray(value) ? `${nameOf(part, key, labels)}: ` : prefix, labels);
+    if (!Array.isArray(value)) return rowsOf(part, below, within, labels);
+    const place = { list: labels[path] ?? path, index: Number(key), name: nameOf(part, key, labels) };
+    return rowsOf(part, below, place, labels);
   });
 }
 

@@ -12,23 +12,23 @@ export const carePage: MethodPage = {
   ],
   formulas: [
     {
-      says: 'Stop and refer, under 18',
-      tex: String.raw`\text{pain} \ge 4 \;\lor\; \text{back or bone pain} \ge 2 \text{ on two days within } 7 \;\lor\; \text{night pain, numbness, or a changed swing}`,
+      says: 'Stop and refer, under 18: pain of 4 or more; back or bone pain of 2 or more on two days of seven; night pain, numbness or a changed swing',
+      tex: String.raw`\begin{aligned} & \text{pain} \ge 4\\ \text{or } & \text{back or bone pain} \ge 2 \text{ on two days within } 7\\ \text{or } & \text{night pain, numbness, or a changed swing} \end{aligned}`,
     },
     {
-      says: 'Reduce, under 18',
-      tex: String.raw`2 \le \text{pain} \le 3 \;\lor\; \text{a rise over the week before} \;\lor\; \text{next morning missing or} > 1`,
+      says: 'Reduce, under 18: pain of 2 or 3, a rise over the week before, or a next morning that is missing or above 1',
+      tex: String.raw`\begin{aligned} & 2 \le \text{pain} \le 3\\ \text{or } & \text{a rise over the week before}\\ \text{or } & \text{next morning missing or} > 1 \end{aligned}`,
     },
     {
-      says: 'At 18 and over',
-      tex: String.raw`\text{pain} > 5 \Rightarrow \text{stop}, \qquad 3 \le \text{pain} \le 5 \Rightarrow \text{reduce}`,
+      says: 'At 18 and over, above 5 stops and 3 to 5 reduces; the other lines are the same',
+      tex: String.raw`\begin{aligned} \text{pain} > 5 &\Rightarrow \text{stop}\\ 3 \le \text{pain} \le 5 &\Rightarrow \text{reduce} \end{aligned}`,
     },
   ],
   tables: [
     {
       title: 'When to see a clinician',
       says: REFER_RULES_NOTE,
-      columns: ['Sign', 'How soon'],
+      columns: [{ header: 'Sign' }, { header: 'How soon' }],
       rows: REFER_RULES.map(({ sentence, urgent }) => [sentence, urgent ? 'the same day' : 'soon']),
     },
   ],

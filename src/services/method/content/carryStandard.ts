@@ -82,6 +82,7 @@ export const carryStandardPage: MethodPage = {
     },
   ],
   outputs: {
+    shots: 'Shot by shot',
     'shots.*.carryStandard': 'standard carry, m',
     'shots.*.adjustment': 'factor',
     'shots.*.reason': 'why not',

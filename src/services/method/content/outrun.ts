@@ -9,9 +9,10 @@ import type { MethodPage } from '#src/services/method/methodPage.ts';
 const raw = String.raw;
 const W = 'our own rule (checks W1 and W3)';
 
-const PUSH = typicalErrorPct({ cvPct: 4, n: 3 });
-const JUMP = typicalErrorPct({ cvPct: 5, n: 3 });
-const HOP = typicalErrorPct({ cvPct: 4.5, n: 3 });
+const typicalError = (cvPct: number) => Number(typicalErrorPct({ cvPct, n: 3 }).toFixed(6));
+const PUSH = typicalError(4);
+const JUMP = typicalError(5);
+const HOP = typicalError(4.5);
 const legs = (lead: number, trail: number, te: number) => ({ lead, trail, teLeadPct: te, teTrailPct: te });
 const number = (path: string, label: string, section: string, unit?: string): FormField => ({
   path,
@@ -222,6 +223,7 @@ export const outrunPage: MethodPage = {
     level: 'Level',
     points: 'Points',
     gate: 'Gate',
+    criteria: 'Criterion by criterion',
     'criteria.*.kind': 'kind',
     'criteria.*.verdict': 'verdict',
     'criteria.*.points': 'points',

@@ -3,7 +3,7 @@ import { DEFAULT_POLICY } from '#src/domain/outrun/policy.ts';
 
 const P = DEFAULT_POLICY;
 const pct = (value: number) => `${String(value).replace('-', '−')} %`;
-const SHOWN = 'never counted';
+const SHOWN = '–';
 
 const criteria = [
   [
@@ -78,23 +78,25 @@ export const outrunTables = [
   {
     title: 'The eight criteria',
     says: 'Met gives one point and strong two, for the first four; the other four are shown and never counted. Where data are missing the answer is cannot say, with no points.',
-    columns: ['Criterion', 'Kind', 'Met', 'Strong', 'Needs'],
+    columns: ['Criterion', 'Kind', 'Met', 'Strong', 'Needs'].map((header) => ({ header })),
     rows: criteria,
   },
   {
     title: 'In our simulated academy',
     says: 'Thirty made-up athletes whose truth is known, three terms a year. First the share in per cent of true outruns at Look or higher by the terms since they began; then the share of athletes without an outrun, by kind, who were flagged in a year. It says nothing of how right the rule is in children.',
     columns: [
-      'Rule and data',
-      '1 term',
-      '2 terms',
-      '3 terms',
-      '4 terms',
-      '5 terms',
-      'Ordinary',
-      'Late growers',
-      'Technique gains',
-      'Deficit only',
+      { header: 'Rule and data' },
+      ...[
+        '1 term',
+        '2 terms',
+        '3 terms',
+        '4 terms',
+        '5 terms',
+        'Ordinary',
+        'Late growers',
+        'Technique gains',
+        'Deficit only',
+      ].map((header) => ({ header, numeric: true })),
     ],
     rows: simulated,
   },

@@ -3,6 +3,7 @@ import { jumpCurve } from '#src/domain/jump/jumpCurve.ts';
 import { exampleJump, exampleSwing } from '#src/services/method/content/exampleCurves.ts';
 import { tracesOf } from '#src/ui/method/tracesOf.ts';
 import { figureRows, figureText } from '#src/ui/words/figureRows.ts';
+import { partTables } from '#src/ui/words/partTables.ts';
 
 describe('figureText', () => {
   it.each([
@@ -48,6 +49,30 @@ describe('figureRows', () => {
       ['criteria.0.interval90', 'Lead deficit: interval90'],
       ['shots.0.carry', '1: carry, m', '150'],
       ['odd.deep', 'deep', '4'],
+    ]);
+    expect(partTables(figureRows(answer, { ...labels, shots: 'Shot by shot' }))).toMatchObject([
+      {
+        list: 'criteria',
+        columns: [
+          { figure: 'verdict', numeric: false },
+          { figure: 'interval90', numeric: false },
+        ],
+        rows: [{ name: 'Lead deficit', cells: [{ lines: ['met'] }, { lines: [] }] }],
+      },
+      {
+        list: 'Shot by shot',
+        columns: [{ figure: 'carry, m', numeric: true }],
+        rows: [{ name: '1', cells: [{ lines: ['150'] }] }],
+      },
+    ]);
+  });
+
+  it('a part that lacks a figure of its neighbours leaves its cell empty', () => {
+    const [table] = partTables(figureRows({ shots: [{ carry: 150 }, { reason: 'no spin' }] }, {}));
+    expect(table!.columns.map(({ figure }) => figure)).toEqual(['carry', 'reason']);
+    expect(table!.rows.map(({ cells }) => cells.map((cell) => cell?.lines))).toEqual([
+      [['150'], undefined],
+      [undefined, ['no spin']],
     ]);
   });
 });
