@@ -13,7 +13,7 @@ export const carePage: MethodPage = {
   formulas: [
     {
       says: 'Stop and refer, under 18: pain of 4 or more; back or bone pain of 2 or more on two days of seven; night pain, numbness or a changed swing',
-      tex: String.raw`\begin{aligned} & \text{pain} \ge 4\\ \text{or } & \text{back or bone pain} \ge 2 \text{ on two days within } 7\\ \text{or } & \text{night pain, numbness, or a changed swing} \end{aligned}`,
+      tex: String.raw`\begin{aligned} & \text{pain} \ge 4\\ \text{or } & \text{back or bone pain} \ge 2\\ & \text{on two days within } 7\\ \text{or } & \text{night pain or numbness}\\ \text{or } & \text{a changed swing} \end{aligned}`,
     },
     {
       says: 'Reduce, under 18: pain of 2 or 3, a rise over the week before, or a next morning that is missing or above 1',

@@ -13,11 +13,11 @@ export const flightPage: MethodPage = {
   formulas: [
     {
       says: 'Acceleration, u the velocity through the air, V its size',
-      tex: raw`\begin{aligned} a_x &= -kV(C_D u_x + C_L u_y)\\ a_y &= -kV(C_D u_y - C_L u_x) - g \end{aligned} \qquad k = \frac{\rho A}{2m}`,
+      tex: raw`\begin{aligned} a_x &= -kV(C_D u_x + C_L u_y)\\ a_y &= -kV(C_D u_y - C_L u_x) - g\\ k &= \frac{\rho A}{2m} \end{aligned}`,
     },
     {
       says: 'Drag and lift by the spin ratio S = ωr/V and the Reynolds number',
-      tex: raw`C_D = 0.24 + 0.18\,S + 0.06 \sin\!\left(\pi\,\frac{\mathrm{Re} - 9\cdot 10^4}{2\cdot 10^5}\right), \qquad C_L = 0.54\,S^{0.4}`,
+      tex: raw`\begin{aligned} C_D ={}& 0.24 + 0.18\,S\\ &+ 0.06 \sin\!\left(\pi\,\frac{\mathrm{Re} - 9\cdot 10^4}{2\cdot 10^5}\right)\\[0.5em] C_L ={}& 0.54\,S^{0.4} \end{aligned}`,
     },
     { says: 'Decay of the spin', tex: raw`\frac{d\omega}{dt} = -2\cdot 10^{-5}\,\frac{\omega V}{r}` },
   ],

@@ -12,7 +12,7 @@ export const growthCentilePage: MethodPage = {
   formulas: [
     {
       says: 'Standard deviations from the median',
-      tex: raw`z = \frac{(X/M)^L - 1}{L\,S}, \qquad z = \frac{\ln(X/M)}{S}\ \text{ where } L = 0`,
+      tex: raw`\begin{aligned} &z = \frac{(X/M)^L - 1}{L\,S}\\[0.5em] &z = \frac{\ln(X/M)}{S}\ \text{ where } L = 0 \end{aligned}`,
     },
     { says: 'Centile', tex: raw`100\,\Phi(z)` },
     { says: 'The way back', tex: raw`X = M\,(1 + L\,S\,z)^{1/L}` },

@@ -15,7 +15,7 @@ export const jumpCurvePage: MethodPage = {
   formulas: [
     {
       says: 'Speed of the centre of mass, from 30 ms before the first movement',
-      tex: raw`v(t) = \frac{1}{m}\int_{t_0}^{t} \bigl(F(\tau) - W\bigr)\,d\tau, \qquad m = \frac{W}{g}`,
+      tex: raw`\begin{aligned} &v(t) = \frac{1}{m}\int_{t_0}^{t} \bigl(F(\tau) - W\bigr)\,d\tau\\[0.5em] &m = \frac{W}{g} \end{aligned}`,
     },
     { says: 'Height', tex: raw`h = \frac{v_{\text{take-off}}^2}{2g}` },
     {

@@ -13,7 +13,7 @@ export const maturityPage: MethodPage = {
   formulas: [
     {
       says: 'Mirwald, boys (age A in years; height H, sitting height B and leg length L = H − B in cm; mass W in kg). The last term is a percentage',
-      tex: raw`\begin{aligned} &-9.236 + 0.0002708\,LB - 0.001663\,AL\\ &+ 0.007216\,AB + 0.02292\cdot\frac{100\,W}{H} \end{aligned}`,
+      tex: raw`\begin{aligned} &-9.236 + 0.0002708\,LB\\ &- 0.001663\,AL + 0.007216\,AB\\ &+ 0.02292\cdot\frac{100\,W}{H} \end{aligned}`,
     },
     {
       says: 'Mirwald, girls',
@@ -25,7 +25,7 @@ export const maturityPage: MethodPage = {
     },
     {
       says: 'Fransen, boys only: a ratio r of the age to the age at the peak',
-      tex: raw`\begin{aligned} r ={}& 6.986547255416\\ &+ 0.115802846632\,A + 0.001450825199\,A^2\\ &+ 0.004518400406\,W - 0.000034086447\,W^2\\ &- 0.151951447289\,H + 0.000932836659\,H^2\\ &- 0.000001656585\,H^3 - 0.000760897942\,HA\\ &+ 0.032198263733\,L - 0.000269025264\,L^2 \end{aligned}`,
+      tex: raw`\begin{aligned} r ={}& 6.986547255416\\ &+ 0.115802846632\,A\\ &+ 0.001450825199\,A^2\\ &+ 0.004518400406\,W\\ &- 0.000034086447\,W^2\\ &- 0.151951447289\,H\\ &+ 0.000932836659\,H^2\\ &- 0.000001656585\,H^3\\ &+ 0.032198263733\,L\\ &- 0.000269025264\,L^2\\ &- 0.000760897942\,HA \end{aligned}`,
     },
   ],
   sources: [

@@ -172,16 +172,16 @@ export const outrunPage: MethodPage = {
   formulas: [
     {
       says: 'Lead deficit: the weighted mean of the differences of the newest two sessions of each test',
-      tex: raw`D = \frac{\sum w\,d}{\sum w}, \qquad w = \frac{1}{\mathrm{TE}_{\text{lead}}^2 + \mathrm{TE}_{\text{trail}}^2}, \qquad \mathrm{SE} = \frac{1}{\sqrt{\sum w}}`,
+      tex: raw`\begin{aligned} &D = \frac{\sum w\,d}{\sum w}, \qquad \mathrm{SE} = \frac{1}{\sqrt{\sum w}}\\[0.5em] &w = \frac{1}{\mathrm{TE}_{\text{lead}}^2 + \mathrm{TE}_{\text{trail}}^2} \end{aligned}`,
     },
     {
       says: 'Carry pulling away: carry C beyond lead push F, height S and age A; newest two less all earlier, less the others’ median',
-      tex: raw`q = 100\,(\ln C - 0.5 \ln F - \ln S) - 2A, \qquad G = \bar q_{\text{newest two}} - \bar q_{\text{earlier}} - \operatorname{median}_{\text{others}}`,
+      tex: raw`\begin{aligned} q ={}& 100\,(\ln C - 0.5 \ln F - \ln S) - 2A\\ G ={}& \bar q_{\text{newest two}} - \bar q_{\text{earlier}}\\ &- \operatorname{median}_{\text{others}} \end{aligned}`,
     },
     { says: 'Its standard error', tex: raw`\mathrm{SE} = 4\sqrt{\tfrac12 + \tfrac{1}{n_{\text{earlier}}}}` },
     {
       says: 'Demand over capacity, both in times body weight; its lower 90 % limit counts',
-      tex: raw`\mathrm{DR} = \frac{\bar F_{\text{swing}}}{\bar F_{\text{push}}}, \qquad \mathrm{SE} = \frac{\mathrm{DR}}{100}\sqrt{\frac{\mathrm{CV}_d^2}{n_d} + 3^2 + \frac{\mathrm{CV}_i^2}{n_i} + 2.5^2}`,
+      tex: raw`\begin{aligned} &\mathrm{DR} = \frac{\bar F_{\text{swing}}}{\bar F_{\text{push}}}\\[0.5em] &\mathrm{SE} = \frac{\mathrm{DR}}{100}\sqrt{\frac{\mathrm{CV}_d^2}{n_d} + 3^2 + \frac{\mathrm{CV}_i^2}{n_i} + 2.5^2} \end{aligned}`,
     },
     {
       says: 'Late return: mean change of lead share from early downswing to impact',
@@ -224,7 +224,7 @@ export const outrunPage: MethodPage = {
     points: 'Points',
     gate: 'Gate',
     criteria: 'Criterion by criterion',
-    'criteria.*.kind': 'kind',
+    'criteria.*.kind': '',
     'criteria.*.verdict': 'verdict',
     'criteria.*.points': 'points',
     'criteria.*.value': 'value',

@@ -66,11 +66,11 @@ const criteria = [
 
 // Terms since it began, then ordinary, late growers, technique gains, deficit only: per cent.
 const simulated = [
-  ['This rule, with force plates, nine terms of data', '22', '83', '97', '99', '100', '0.8', '1.0', '2.3', '20'],
-  ['This rule, without plates, nine terms', '6', '31', '55', '69', '77', '0.6', '0.8', '4.4', '26'],
-  ['This rule, without plates, five terms', '5', '24', '40', '49', '–', '0.5', '0.1', '3.2', '17'],
-  ['A spreadsheet: any test over 10 %', '64', '94', '99', '100', '100', '74', '74', '78', '99'],
-  ['A spreadsheet: any test over 15 %', '30', '62', '75', '83', '89', '19', '18', '20', '80'],
+  ['Plates, 9 terms', '22', '83', '97', '99', '100', '0.8', '1.0', '2.3', '20'],
+  ['No plates, 9 terms', '6', '31', '55', '69', '77', '0.6', '0.8', '4.4', '26'],
+  ['No plates, 5 terms', '5', '24', '40', '49', '–', '0.5', '0.1', '3.2', '17'],
+  ['Any test over 10 %', '64', '94', '99', '100', '100', '74', '74', '78', '99'],
+  ['Any test over 15 %', '30', '62', '75', '83', '89', '19', '18', '20', '80'],
 ];
 
 /** The criteria with their thresholds in force, and what the rule found in simulation. */
@@ -83,7 +83,7 @@ export const outrunTables = [
   },
   {
     title: 'In our simulated academy',
-    says: 'Thirty made-up athletes whose truth is known, three terms a year. First the share in per cent of true outruns at Look or higher by the terms since they began; then the share of athletes without an outrun, by kind, who were flagged in a year. It says nothing of how right the rule is in children.',
+    says: 'Thirty made-up athletes whose truth is known, three terms a year. Three rows are this rule, with force plates or without, after so many terms of data; two are a spreadsheet that marks any test over a fixed line. First the share in per cent of true outruns at Look or higher by the terms since they began; then the share of athletes without an outrun, by kind, who were flagged in a year. It says nothing of how right the rule is in children.',
     columns: [
       { header: 'Rule and data' },
       ...[

@@ -14,7 +14,7 @@ export const reliabilityPage: MethodPage = {
   formulas: [
     {
       says: 'One trial, people and trials both drawn at random',
-      tex: raw`\mathrm{ICC}(2,1) = \frac{\mathrm{BMS} - \mathrm{EMS}}{\mathrm{BMS} + (k-1)\,\mathrm{EMS} + k(\mathrm{JMS} - \mathrm{EMS})/n}`,
+      tex: raw`\begin{aligned} &\mathrm{ICC}(2,1) = \frac{\mathrm{BMS} - \mathrm{EMS}}{E}\\ &E = \mathrm{BMS} + (k-1)\,\mathrm{EMS}\\ &\quad + k(\mathrm{JMS} - \mathrm{EMS})/n \end{aligned}`,
     },
     {
       says: 'One trial, the same fixed trials for all',
@@ -26,7 +26,7 @@ export const reliabilityPage: MethodPage = {
     },
     {
       says: 'Minimal detectable change',
-      tex: raw`\mathrm{MDC}_{95} = 1.96\,\sqrt 2\,\mathrm{SEM}, \qquad \mathrm{MDC}_{90} = 1.6449\,\sqrt 2\,\mathrm{SEM}`,
+      tex: raw`\begin{aligned} &\mathrm{MDC}_{95} = 1.96\,\sqrt 2\,\mathrm{SEM}\\[0.5em] &\mathrm{MDC}_{90} = 1.6449\,\sqrt 2\,\mathrm{SEM} \end{aligned}`,
     },
     {
       says: 'Coefficient of variation by logarithms, s the typical error of the natural logarithms',

@@ -13,15 +13,15 @@ export const trendPage: MethodPage = {
   formulas: [
     {
       says: 'Least squares',
-      tex: raw`b = \frac{\sum (x_i - \bar x)(y_i - \bar y)}{\sum (x_i - \bar x)^2}, \qquad a = \bar y - b\,\bar x`,
+      tex: raw`\begin{aligned} &b = \frac{\sum (x_i - \bar x)(y_i - \bar y)}{\sum (x_i - \bar x)^2}\\[0.5em] &a = \bar y - b\,\bar x \end{aligned}`,
     },
     {
       says: 'Theil–Sen',
-      tex: raw`\tilde b = \operatorname{median}_{i<j} \frac{y_j - y_i}{x_j - x_i}, \qquad \tilde a = \operatorname{median}(y) - \tilde b\,\operatorname{median}(x)`,
+      tex: raw`\begin{aligned} &\tilde b = \operatorname{median}_{i<j} \frac{y_j - y_i}{x_j - x_i}\\[0.5em] &\tilde a = \operatorname{median}(y) - \tilde b\,\operatorname{median}(x) \end{aligned}`,
     },
     {
       says: 'Mann–Kendall',
-      tex: raw`S = \sum_{i<j} \operatorname{sgn}(y_j - y_i), \qquad Z = \frac{S - \operatorname{sgn}(S)}{\sqrt{\operatorname{Var}(S)}}`,
+      tex: raw`\begin{aligned} &S = \sum_{i<j} \operatorname{sgn}(y_j - y_i)\\[0.5em] &Z = \frac{S - \operatorname{sgn}(S)}{\sqrt{\operatorname{Var}(S)}} \end{aligned}`,
     },
   ],
   sources: [
