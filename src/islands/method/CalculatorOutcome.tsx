@@ -15,7 +15,7 @@ export function CalculatorOutcome({ name, labels, outcome: { request, answer } }
   const { reason } = answer as { reason?: string | null };
   return (
     <>
-      {reason && <p className="say">Not everything can be given: {reason}.</p>}
+      {reason && <p className="say">Not everything can be given. {sentence(reason)}</p>}
       {tracesOf(name, request, answer).map((trace, i) => (
         <TracePlot key={trace.yUnit} trace={trace} tall={i === 0} />
       ))}
@@ -23,3 +23,5 @@ export function CalculatorOutcome({ name, labels, outcome: { request, answer } }
     </>
   );
 }
+
+const sentence = (text: string) => `${text.charAt(0).toUpperCase()}${text.slice(1)}${text.endsWith('.') ? '' : '.'}`;
