@@ -61,7 +61,7 @@ export function contextCriterion(block: OutrunInput['context']): Criterion {
     return cannotSay(
       'context',
       null,
-      `${once}Nothing is known of hip rotation measured twice, growth, driver balls or pain.`,
+      `${once}Nothing is known of hip rotation measured twice, growth or driver balls.`,
     );
   }
   return found('context', null, {
