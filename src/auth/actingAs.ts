@@ -3,11 +3,8 @@ import type { Viewer } from '#src/access/viewer.ts';
 import { SESSION_COOKIE, SESSION_MAX_AGE_S } from '#src/auth/cookies.ts';
 import { hashToken, makeToken } from '#src/auth/token.ts';
 import { authDb } from '#src/db/client.ts';
-import { listMemberships, turnSession } from '#src/db/queries/sessions.ts';
+import { turnSession } from '#src/db/queries/sessions.ts';
 import { notFound } from '#src/errors/appError.ts';
-
-/** The (academy, role) pairs that a signed-in person may act as. */
-export const listOwnMemberships = ({ personId }: Pick<Viewer, 'personId'>) => listMemberships(authDb(), personId);
 
 /**
  * Turns the session to another (academy, role) of the same person, under a new token: the value for the cookie.

@@ -23,8 +23,3 @@ export function listGroundTraces(trx: Tx, athleteId: string) {
     .orderBy('ground_trace.swing_no')
     .execute();
 }
-
-/** Samples of both channels of one trace: little-endian 32-bit floats. */
-export function listGroundChannels(trx: Tx, traceId: string) {
-  return trx.selectFrom('ground_channel').select(['side', 'samples']).where('ground_trace_id', '=', traceId).execute();
-}
