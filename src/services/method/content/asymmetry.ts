@@ -17,11 +17,11 @@ export const asymmetryPage: MethodPage = {
     },
     {
       says: 'Its standard error from the trials of one day, CVs as fractions',
-      tex: raw`\mathrm{SE} = 100\,\frac{\min}{\max}\sqrt{\frac{\mathrm{CV}_{\text{lead}}^2}{n_{\text{lead}}} + \frac{\mathrm{CV}_{\text{trail}}^2}{n_{\text{trail}}}}`,
+      tex: raw`\mathrm{SE} = 100\,\frac{\text{min}}{\text{max}}\sqrt{\frac{\mathrm{CV}_{\text{lead}}^2}{n_{\text{lead}}} + \frac{\mathrm{CV}_{\text{trail}}^2}{n_{\text{trail}}}}`,
     },
     {
       says: 'The same from a typical error between days of each leg’s mean, in per cent',
-      tex: raw`\mathrm{SE} = \frac{\min}{\max}\sqrt{\mathrm{TE}_{\text{lead}}^2 + \mathrm{TE}_{\text{trail}}^2}`,
+      tex: raw`\mathrm{SE} = \frac{\text{min}}{\text{max}}\sqrt{\mathrm{TE}_{\text{lead}}^2 + \mathrm{TE}_{\text{trail}}^2}`,
     },
     {
       says: 'The 90 % interval: z = 1.644854, or Student’s t with Welch–Satterthwaite degrees of freedom where the trials themselves give the noise',
