@@ -3,6 +3,7 @@ import type { SeedDb } from '#db/seed/seedDb.ts';
 import { TERMS, TRUTHS } from '#db/seed/truth.ts';
 import { CATALOGUE } from '#src/domain/catalogue/catalogue.ts';
 import { DEFAULT_POLICY } from '#src/domain/outrun/policy.ts';
+import { testRow } from '#src/services/programme/testRow.ts';
 import { RULE_VERSION } from '#src/domain/outrun/ruleVersion.ts';
 
 export interface SeededAcademy {
@@ -36,27 +37,7 @@ export async function seedAcademy(db: SeedDb, random: Random): Promise<SeededAca
   await db.insertInto('term').values(terms).execute();
 
   const tests = new Map(CATALOGUE.map(({ key }) => [key, random.uuid()]));
-  const rows = CATALOGUE.map((test) => ({
-    ...own,
-    id: tests.get(test.key)!,
-    key: test.key,
-    name: test.name,
-    quantity: test.quantity,
-    unit: test.unit,
-    sided: test.sided,
-    better: test.better,
-    compares_in: test.comparesIn,
-    attempts: test.attempts,
-    uses: test.uses,
-    rest_s: test.restS,
-    lowest_si: test.lowestSi,
-    highest_si: test.highestSi,
-    cv_pct: test.cvPct,
-    noise_source: test.noiseSource,
-    protocol: test.protocol,
-    capacity: test.capacity,
-    first_medians_si: [...test.firstMediansSi],
-  }));
+  const rows = CATALOGUE.map((test) => ({ ...own, id: tests.get(test.key)!, ...testRow(test) }));
   await db.insertInto('test').values(rows).execute();
   const batteryId = random.uuid();
   await db

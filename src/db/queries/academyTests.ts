@@ -1,5 +1,6 @@
 import { sql } from 'kysely';
 import type { Tx } from '#src/db/client.ts';
+import { newestHand, plays } from '#src/db/queries/handedness.ts';
 
 /** Tests of the viewer's academy as recording needs them, values in SI. */
 export function listAcademyTests(trx: Tx) {
@@ -31,24 +32,14 @@ export function listBatteries(trx: Tx) {
 export function listAthletesToRecord(trx: Tx) {
   return trx
     .selectFrom('athlete')
-    .leftJoinLateral(
-      (eb) =>
-        eb
-          .selectFrom('handedness')
-          .select('handedness.plays')
-          .whereRef('handedness.athlete_id', '=', 'athlete.id')
-          .orderBy('handedness.recorded_at', 'desc')
-          .limit(1)
-          .as('hand'),
-      (join) => join.onTrue(),
-    )
+    .leftJoinLateral(newestHand, (join) => join.onTrue())
     .select([
       'athlete.id',
       'athlete.given_name as givenName',
       'athlete.family_name as familyName',
       'athlete.birth_date as birthDate',
       'athlete.squad_id as squadId',
-      sql<'left' | 'right'>`coalesce(hand.plays, 'right')`.as('plays'),
+      plays,
     ])
     .orderBy('athlete.family_name')
     .orderBy('athlete.given_name')

@@ -1,6 +1,7 @@
 import { sql } from 'kysely';
 import { jsonArrayFrom } from 'kysely/helpers/postgres';
 import type { Tx } from '#src/db/client.ts';
+import { newestHand, plays } from '#src/db/queries/handedness.ts';
 
 /** Names, squad, birth date, sex, what they play, restrictions in force and the open outrun of athletes in scope. */
 export function selectAthletes(trx: Tx) {
@@ -8,17 +9,7 @@ export function selectAthletes(trx: Tx) {
     trx
       .selectFrom('athlete')
       .innerJoin('squad', 'squad.id', 'athlete.squad_id')
-      .leftJoinLateral(
-        (eb) =>
-          eb
-            .selectFrom('handedness')
-            .select(['handedness.plays', 'handedness.recorded_at'])
-            .whereRef('handedness.athlete_id', '=', 'athlete.id')
-            .orderBy('handedness.recorded_at', 'desc')
-            .limit(1)
-            .as('hand'),
-        (join) => join.onTrue(),
-      )
+      .leftJoinLateral(newestHand, (join) => join.onTrue())
       // Families have no row here: row security answers with none.
       .leftJoinLateral(
         (eb) =>
@@ -43,7 +34,7 @@ export function selectAthletes(trx: Tx) {
         'athlete.person_id as personId',
         'squad.id as squadId',
         'squad.name as squadName',
-        sql<'left' | 'right'>`coalesce(hand.plays, 'right')`.as('plays'),
+        plays,
         'outrun.id as outrunId',
         'outrun.level as outrunLevel',
         'outrun.state as outrunState',

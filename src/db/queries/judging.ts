@@ -1,27 +1,13 @@
 import { sql } from 'kysely';
 import type { Tx } from '#src/db/client.ts';
+import { newestHand, plays } from '#src/db/queries/handedness.ts';
 
 /** Birth date, sex and what they play, of athletes in scope. */
 export function listForJudging(trx: Tx, athleteIds: readonly string[]) {
   return trx
     .selectFrom('athlete')
-    .leftJoinLateral(
-      (eb) =>
-        eb
-          .selectFrom('handedness')
-          .select('handedness.plays')
-          .whereRef('handedness.athlete_id', '=', 'athlete.id')
-          .orderBy('handedness.recorded_at', 'desc')
-          .limit(1)
-          .as('hand'),
-      (join) => join.onTrue(),
-    )
-    .select([
-      'athlete.id',
-      'athlete.birth_date as birthDate',
-      'athlete.sex',
-      sql<'left' | 'right'>`coalesce(hand.plays, 'right')`.as('plays'),
-    ])
+    .leftJoinLateral(newestHand, (join) => join.onTrue())
+    .select(['athlete.id', 'athlete.birth_date as birthDate', 'athlete.sex', plays])
     .where('athlete.id', 'in', [...athleteIds])
     .execute();
 }

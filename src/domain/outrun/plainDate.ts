@@ -1,17 +1,4 @@
-const MONTHS = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-];
+import { MONTH_NAMES } from '#src/domain/calendar/monthNames.ts';
 
 /**
  * A date in words.
@@ -21,7 +8,7 @@ const MONTHS = [
  */
 export function plainDate(date: string): string {
   const [year, month, day] = date.split('-').map(Number);
-  return `${day} ${MONTHS[month! - 1]} ${year}`;
+  return `${day} ${MONTH_NAMES[month! - 1]} ${year}`;
 }
 
 /**

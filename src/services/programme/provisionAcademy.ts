@@ -17,6 +17,7 @@ import {
   listTakenUserNames,
 } from '#src/db/queries/provisioning.ts';
 import { CATALOGUE } from '#src/domain/catalogue/catalogue.ts';
+import { testRow } from '#src/services/programme/testRow.ts';
 import { plainLetters, wordsOf } from '#src/domain/catalogue/wordsOf.ts';
 import type { Sex } from '#src/domain/growth/sex.ts';
 import { DEFAULT_POLICY } from '#src/domain/outrun/policy.ts';
@@ -139,28 +140,6 @@ const athleteKey = ({
   birthDate,
 }: Pick<ProvisionedAthlete, 'givenName' | 'familyName' | 'birthDate'>) =>
   `${wordsOf(plainLetters(`${givenName} ${familyName}`)).join(' ')} ${birthDate}`;
-
-function testRow(test: (typeof CATALOGUE)[number]) {
-  return {
-    key: test.key,
-    name: test.name,
-    quantity: test.quantity,
-    unit: test.unit,
-    sided: test.sided,
-    better: test.better,
-    compares_in: test.comparesIn,
-    attempts: test.attempts,
-    uses: test.uses,
-    rest_s: test.restS,
-    lowest_si: test.lowestSi,
-    highest_si: test.highestSi,
-    cv_pct: test.cvPct,
-    noise_source: test.noiseSource,
-    protocol: test.protocol,
-    capacity: test.capacity,
-    first_medians_si: [...test.firstMediansSi],
-  };
-}
 
 /** User names that nobody has yet, and passwords that nobody chose. */
 async function newSignIns(academyName: string): Promise<SignIn[]> {

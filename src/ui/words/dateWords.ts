@@ -1,17 +1,4 @@
-const MONTHS = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-] as const;
+import { MONTH_NAMES } from '#src/domain/calendar/monthNames.ts';
 
 /**
  * A calendar date in words. It is read as text: no clock and no time zone can move a day.
@@ -23,7 +10,7 @@ const MONTHS = [
  */
 export function dateWords(date: string, form: 'short' | 'day' | 'long' = 'long'): string {
   const [, year, month, day] = /^(\d{4})-(\d{2})-(\d{2})$/.exec(date) ?? [];
-  const name = MONTHS[Number(month) - 1];
+  const name = MONTH_NAMES[Number(month) - 1];
   if (!name) throw new RangeError(`dateWords requires a date as YYYY-MM-DD, got ${date}`);
   if (form === 'short') return `${Number(day)} ${name.slice(0, 3)}`;
   return form === 'day' ? `${Number(day)} ${name}` : `${Number(day)} ${name} ${year}`;
