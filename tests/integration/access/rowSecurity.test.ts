@@ -73,6 +73,49 @@ const ABOUT_ATHLETES: Readonly<Record<string, readonly Who[]>> = {
   outrun_note: STAFF,
 };
 
+const STRENGTH = ['director', 'strength'] as const;
+const SWING = ['director', 'swing'] as const;
+
+/** Who may change rows of these tables, for the athletes in their scope (PRODUCT.md, "Who sees what"). */
+const WRITERS: Readonly<Record<string, readonly Who[]>> = {
+  guardian_address: ['director'],
+  handedness: STAFF,
+  trial: STRENGTH,
+  curve: STRENGTH,
+  growth_measure: [...STRENGTH, 'guardian'],
+  restriction: STAFF,
+  driver_session_athlete: SWING,
+  shot: SWING,
+  ground_trace: SWING,
+  ground_channel: SWING,
+  judgement: STAFF,
+  outrun: STAFF,
+  outrun_event: STAFF,
+  outrun_note: STAFF,
+};
+/** What is added to and never changed. */
+const UNCHANGING = ['handedness', 'judgement', 'outrun_event', 'outrun_note'];
+
+/** Athletes whose rows an update without a WHERE would change, as the application's role. */
+async function changedAs(settings: Settings, table: string): Promise<unknown[]> {
+  await app.query('begin');
+  try {
+    await app.query(
+      `select set_config('app.academy', $1, true), set_config('app.person', $2, true), set_config('app.role', $3, true)`,
+      [settings.academy, settings.person, settings.role],
+    );
+    const { rows } = await app.query<{ athlete_id: unknown }>(
+      `update ${table} set academy_id = academy_id returning athlete_id`,
+    );
+    return rows.map(({ athlete_id: id }) => id);
+  } catch (error) {
+    if ((error as { code?: string }).code === '42501') return [];
+    throw error;
+  } finally {
+    await app.query('rollback');
+  }
+}
+
 /** Every other table, with how many rows each role reads in this world. */
 const OTHERS: Readonly<Record<string, Partial<Record<Who, number>>>> = {
   academy: { director: 1, strength: 1, swing: 1, guardian: 1, formerGuardian: 1, athlete: 1 },
@@ -174,6 +217,17 @@ describe('row security', () => {
     await bornYearsAgo(18);
     expect(await sees()).toBe(false);
     await superuser.query(`update athlete set birth_date = '2013-05-05' where id = $1`, [child]);
+  });
+
+  it.each(Object.keys(ABOUT_ATHLETES))('lets each role change only what it may: %s', async (table) => {
+    for (const [who, person] of Object.entries(here.people)) {
+      const writers = WRITERS[table]!;
+      const changed = await changedAs(as(here, person), table);
+      const own = writers.includes(who as Who) && !UNCHANGING.includes(table) ? person.scope : [];
+      // A parent changes only what was measured at home, and nothing in this world was.
+      const expected = table === 'growth_measure' && person.role === 'guardian' ? [] : own;
+      expect([...new Set(changed)].sort(), who).toEqual([...expected].sort());
+    }
   });
 
   it('refuses rows written for another academy, and for athletes out of scope', async () => {
