@@ -482,6 +482,8 @@ CREATE TABLE public.outbox (
     state text DEFAULT 'queued'::text NOT NULL,
     attempts integer DEFAULT 0 NOT NULL,
     last_answer text,
+    not_before timestamp with time zone DEFAULT now() NOT NULL,
+    claimed_at timestamp with time zone,
     made_at timestamp with time zone DEFAULT now() NOT NULL,
     sent_at timestamp with time zone,
     CONSTRAINT outbox_check CHECK (((person_id IS NULL) <> (address IS NULL))),

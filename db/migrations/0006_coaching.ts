@@ -85,6 +85,9 @@ create table outbox (
   state text not null default 'queued' check (state in ('queued', 'sending', 'sent', 'failed', 'unknown')),
   attempts int not null default 0,
   last_answer text,
+  -- not tried again before
+  not_before timestamptz not null default now(),
+  claimed_at timestamptz,
   made_at timestamptz not null default now(),
   sent_at timestamptz,
   unique (academy_id, message_key),

@@ -296,11 +296,13 @@ export interface Outbox {
   academy_id: string;
   address: string | null;
   attempts: Generated<number>;
+  claimed_at: Timestamp | null;
   id: Generated<string>;
   kind: string;
   last_answer: string | null;
   made_at: Generated<Timestamp>;
   message_key: string;
+  not_before: Generated<Timestamp>;
   payload: Json;
   person_id: string | null;
   sent_at: Timestamp | null;
