@@ -22,10 +22,12 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
     'errors',
     'auth',
     'styles',
+    'mail',
   ],
   'middleware.ts': ['auth', 'access', 'http', 'errors'],
   'env.d.ts': ['access'],
-  server: ['http', 'jobs', 'db', 'errors'],
+  // The demo's own mail server and its page.
+  server: ['http', 'jobs', 'db', 'errors', 'mail'],
   cli: ['services', 'db', 'errors', 'access', 'domain', 'auth'],
   layouts: ['components', 'islands', 'ui', 'domain', 'access', 'styles', 'services'],
   components: ['islands', 'ui', 'domain', 'services', 'access'],

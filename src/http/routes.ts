@@ -44,6 +44,7 @@ export const ROUTES: readonly Route[] = [
   page('/family', 'family:see'),
   page('/family/[athleteId]', 'family:see'),
   page('/my/progress', 'own:see'),
+  page('/dev/mail', 'public'),
 
   api('GET', '/api/auth/[...auth]', 'public'),
   api('POST', '/api/auth/[...auth]', 'public'),

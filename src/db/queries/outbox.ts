@@ -38,12 +38,9 @@ export async function insertMessage(trx: Tx, { kind, personId, address, payload,
  */
 export async function claimMessages(trx: Tx, most: number) {
   const claimed = await trx
-    .updateTable('outbox')
-    .set((eb) => ({ state: 'sending', claimed_at: sql<Date>`clock_timestamp()`, attempts: eb('attempts', '+', 1) }))
-    .where(
-      'id',
-      'in',
-      trx
+    // Its own step: inside the update, the planner may run the choice again for each row.
+    .with('due', (db) =>
+      db
         .selectFrom('outbox')
         .select('id')
         .where('state', '=', 'queued')
@@ -53,7 +50,22 @@ export async function claimMessages(trx: Tx, most: number) {
         .forUpdate()
         .skipLocked(),
     )
-    .returning(['id', 'kind', 'payload', 'attempts', 'address', 'person_id as personId'])
+    .updateTable('outbox')
+    .from('due')
+    .set((eb) => ({
+      state: 'sending',
+      claimed_at: sql<Date>`clock_timestamp()`,
+      attempts: eb('outbox.attempts', '+', 1),
+    }))
+    .whereRef('outbox.id', '=', 'due.id')
+    .returning([
+      'outbox.id',
+      'outbox.kind',
+      'outbox.payload',
+      'outbox.attempts',
+      'outbox.address',
+      'outbox.person_id as personId',
+    ])
     .execute();
   const people = claimed.flatMap(({ personId }) => personId ?? []);
   const contacts = people.length === 0 ? [] : await listAddresses(trx, people);
@@ -115,12 +127,12 @@ export async function markLost(trx: Tx): Promise<void> {
     .execute();
 }
 
-/** Seconds until the next message is due; null where none waits. */
+/** Seconds until there is something to do again: a message is due, or one is long enough without an answer. */
 export async function nextDueS(trx: Tx): Promise<number | null> {
-  const row = await trx
-    .selectFrom('outbox')
-    .select(sql<number | null>`extract(epoch from min(not_before) - clock_timestamp())::float8`.as('dueS'))
-    .where('state', '=', 'queued')
-    .executeTakeFirst();
-  return row?.dueS ?? null;
+  const { rows } = await sql<{ dueS: number | null }>`
+    select extract(epoch from min(case state when 'queued' then not_before else claimed_at + interval '10 minutes' end)
+      - clock_timestamp())::float8 as "dueS"
+    from outbox where state in ('queued', 'sending')
+  `.execute(trx);
+  return rows[0]?.dueS ?? null;
 }
