@@ -1,3 +1,7 @@
+// Dots stand only between letters (RFC 5322 dot-atom): anything else would have to be quoted.
+const MAILBOX =
+  /^(?=.{1,64}@)[\w!#$%&'*+/=?^`{|}~-]+(\.[\w!#$%&'*+/=?^`{|}~-]+)*@[a-z\d]([a-z\d-]*[a-z\d])?(\.[a-z\d]([a-z\d-]*[a-z\d])?)*$/i;
+
 /**
  * An address that may stand in an envelope: one mailbox, plain letters, nothing that a server could read as two
  * addresses, a header or a command.
@@ -9,10 +13,7 @@ export function checkAddress(address: string): string {
   const plain = address.normalize('NFKC');
   // A letter that becomes another on the way, an @ among them, is somebody else's address.
   if (plain !== address || !/^[\x21-\x7e]+$/.test(plain)) throw new RangeError('address holds letters beyond ASCII');
-  if (
-    address.length > 254 ||
-    !/^[A-Za-z0-9!#$%&'*+/=?^_`{|}~.-]{1,64}@[A-Za-z0-9]([A-Za-z0-9.-]*[A-Za-z0-9])?$/.test(address)
-  ) {
+  if (address.length > 254 || !MAILBOX.test(address)) {
     throw new RangeError('address is not one plain mailbox');
   }
   return address;
