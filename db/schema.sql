@@ -1429,6 +1429,10 @@ ALTER TABLE public.athlete ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY athlete_add ON public.athlete FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
+CREATE POLICY athlete_auth ON public.athlete FOR SELECT TO marram_auth USING (true);
+
+CREATE POLICY athlete_auth_sign_in ON public.athlete FOR UPDATE TO marram_auth USING ((person_id IS NULL)) WITH CHECK ((person_id IS NOT NULL));
+
 CREATE POLICY athlete_change ON public.athlete FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as) AND (id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
 CREATE POLICY athlete_job ON public.athlete TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
@@ -1572,7 +1576,11 @@ ALTER TABLE public.guardianship ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY guardianship_add ON public.guardianship FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
+CREATE POLICY guardianship_auth ON public.guardianship FOR SELECT TO marram_auth USING (true);
+
 CREATE POLICY guardianship_auth_add ON public.guardianship FOR INSERT TO marram_auth WITH CHECK (true);
+
+CREATE POLICY guardianship_auth_restart ON public.guardianship FOR UPDATE TO marram_auth USING (true) WITH CHECK ((ended_at IS NULL));
 
 CREATE POLICY guardianship_change ON public.guardianship FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
@@ -1617,6 +1625,8 @@ CREATE POLICY membership_add ON public.membership FOR INSERT TO marram_app WITH 
 CREATE POLICY membership_auth ON public.membership FOR SELECT TO marram_auth USING (true);
 
 CREATE POLICY membership_auth_add ON public.membership FOR INSERT TO marram_auth WITH CHECK (true);
+
+CREATE POLICY membership_auth_restart ON public.membership FOR UPDATE TO marram_auth USING (true) WITH CHECK ((ended_at IS NULL));
 
 CREATE POLICY membership_change ON public.membership FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
@@ -1898,6 +1908,16 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.athlete TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.athlete TO marram_app;
 GRANT SELECT ON TABLE public.athlete TO marram_backup;
 
+GRANT SELECT(id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(academy_id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(person_id),UPDATE(person_id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(given_name) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(family_name) ON TABLE public.athlete TO marram_auth;
+
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.attempt_limit TO marram_auth;
 GRANT SELECT ON TABLE public.attempt_limit TO marram_backup;
 
@@ -1957,8 +1977,10 @@ GRANT SELECT ON TABLE public.guardian_address TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.guardianship TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.guardianship TO marram_app;
-GRANT INSERT ON TABLE public.guardianship TO marram_auth;
+GRANT SELECT,INSERT ON TABLE public.guardianship TO marram_auth;
 GRANT SELECT ON TABLE public.guardianship TO marram_backup;
+
+GRANT UPDATE(ended_at) ON TABLE public.guardianship TO marram_auth;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.handedness TO marram_job;
 GRANT SELECT,INSERT ON TABLE public.handedness TO marram_app;
@@ -1976,6 +1998,8 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.membership TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.membership TO marram_app;
 GRANT SELECT,INSERT ON TABLE public.membership TO marram_auth;
 GRANT SELECT ON TABLE public.membership TO marram_backup;
+
+GRANT UPDATE(ended_at) ON TABLE public.membership TO marram_auth;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.notebook_entry TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.notebook_entry TO marram_app;

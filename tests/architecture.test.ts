@@ -41,7 +41,7 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   queue: ['db'],
   jobs: ['services', 'mail', 'reports', 'db', 'queue'],
   mail: ['domain', 'errors'],
-  auth: ['services', 'db', 'access', 'errors', 'http'],
+  auth: ['services', 'db', 'access', 'errors', 'http', 'schemas', 'domain'],
   access: ['errors'],
   domain: [],
   errors: [],

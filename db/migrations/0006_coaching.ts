@@ -179,6 +179,18 @@ create policy membership_auth_add on membership for insert to marram_auth with c
 create policy squad_coach_auth_add on squad_coach for insert to marram_auth with check (true);
 create policy guardianship_auth_add on guardianship for insert to marram_auth with check (true);
 grant insert on person, person_contact, membership, squad_coach, guardianship to marram_auth;
+-- Someone who left and is invited again takes up the same membership and the same link.
+create policy membership_auth_restart on membership for update to marram_auth using (true) with check (ended_at is null);
+create policy guardianship_auth on guardianship for select to marram_auth using (true);
+create policy guardianship_auth_restart on guardianship for update to marram_auth using (true) with check (ended_at is null);
+grant update (ended_at) on membership, guardianship to marram_auth;
+grant select on guardianship to marram_auth;
+-- An athlete gets a sign-in of their own once.
+create policy athlete_auth on athlete for select to marram_auth using (true);
+create policy athlete_auth_sign_in on athlete for update to marram_auth
+  using (person_id is null) with check (person_id is not null);
+grant select (id, academy_id, person_id, given_name, family_name) on athlete to marram_auth;
+grant update (person_id) on athlete to marram_auth;
 
 create or replace function app.enqueue(task text, payload jsonb, job_key text) returns void language plpgsql security definer
   set search_path = pg_catalog, pg_temp

@@ -1,5 +1,5 @@
 import { createTransport } from 'nodemailer';
-import { checkAddress, checkHeaderLine } from '#src/mail/checkAddress.ts';
+import { checkAddress, checkHeaderLine } from '#src/domain/mail/checkAddress.ts';
 import type { Message } from '#src/mail/composeMessage.ts';
 
 /** What the mail server said, and what it means for the message. */
