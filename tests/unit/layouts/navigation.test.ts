@@ -7,8 +7,8 @@ import { placesFor } from '#src/layouts/navigation.ts';
 describe('the places in the header', () => {
   it.each([
     ['director', ['Today', 'Squads', 'Asked values', 'Outruns', 'Programme', 'Method']],
-    ['strength_coach', ['Today', 'Squads', 'Asked values', 'Outruns', 'Programme', 'Method']],
-    ['swing_coach', ['Today', 'Squads', 'Outruns', 'Programme', 'Method']],
+    ['strength_coach', ['Today', 'Squads', 'Asked values', 'Outruns', 'Method']],
+    ['swing_coach', ['Today', 'Squads', 'Outruns', 'Method']],
     ['guardian', ['Family', 'Method']],
     ['athlete', ['Progress', 'Method']],
   ] as const)('of a %s', (role, labels) => {
