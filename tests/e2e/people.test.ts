@@ -70,7 +70,7 @@ describe('people', () => {
       if (referer) referers.push(referer);
     });
     await page.goto(link);
-    await page.getByText('invites new.swing@saltmarsh.example to Marram as swing coach for one squad').waitFor();
+    await page.getByText('invites new.swing@saltmarsh.example to Marram as swing coach for 1 squad').waitFor();
     expect(await axe(page)).toEqual([]);
     await page.getByLabel('Given name').fill('Ottilie');
     await page.getByLabel('Family name').fill('Brandreth');
