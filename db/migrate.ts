@@ -7,6 +7,7 @@ import * as testing from '#db/migrations/0002_testing.ts';
 import * as driver from '#db/migrations/0003_driver.ts';
 import * as outrun from '#db/migrations/0004_outrun.ts';
 import * as jobs from '#db/migrations/0005_jobs.ts';
+import * as coaching from '#db/migrations/0006_coaching.ts';
 
 /** Every migration, oldest first. A shipped one is never edited. */
 export const migrations: Readonly<Record<string, Migration>> = {
@@ -15,6 +16,7 @@ export const migrations: Readonly<Record<string, Migration>> = {
   '0003_driver': driver,
   '0004_outrun': outrun,
   '0005_jobs': jobs,
+  '0006_coaching': coaching,
 };
 
 export interface MigrateOptions {

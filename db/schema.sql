@@ -46,13 +46,13 @@ CREATE FUNCTION app.enqueue(task text, payload jsonb, job_key text) RETURNS void
     LANGUAGE plpgsql SECURITY DEFINER
     SET search_path TO 'pg_catalog', 'pg_temp'
     AS $$
-      begin
-        if task not in ('rejudgeOthers') then
-          raise exception 'enqueue requires a listed task, got %', task;
-        end if;
-        perform graphile_worker.add_job(task, payload::json, job_key => job_key, job_key_mode => 'replace');
-      end
-      $$;
+  begin
+    if task not in ('rejudgeOthers', 'sendMail') then
+      raise exception 'enqueue requires a listed task, got %', task;
+    end if;
+    perform graphile_worker.add_job(task, payload::json, job_key => job_key, job_key_mode => 'replace');
+  end
+  $$;
 
 CREATE FUNCTION app.person_id() RETURNS uuid
     LANGUAGE sql STABLE
@@ -209,6 +209,20 @@ CREATE TABLE public.battery_test (
 
 ALTER TABLE ONLY public.battery_test FORCE ROW LEVEL SECURITY;
 
+CREATE TABLE public.column_mapping (
+    id uuid DEFAULT gen_random_uuid() NOT NULL,
+    academy_id uuid NOT NULL,
+    name text NOT NULL,
+    kind text NOT NULL,
+    mapping jsonb NOT NULL,
+    made_by uuid,
+    made_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT column_mapping_kind_check CHECK ((kind = ANY (ARRAY['driver'::text, 'ground'::text, 'curve'::text]))),
+    CONSTRAINT column_mapping_name_check CHECK (((length(name) >= 1) AND (length(name) <= 80)))
+);
+
+ALTER TABLE ONLY public.column_mapping FORCE ROW LEVEL SECURITY;
+
 CREATE TABLE public.credential (
     person_id uuid NOT NULL,
     password_hash text NOT NULL,
@@ -235,6 +249,7 @@ CREATE TABLE public.curve (
     source_hash bytea NOT NULL,
     recorded_by uuid,
     recorded_at timestamp with time zone DEFAULT now() NOT NULL,
+    trial_id uuid,
     CONSTRAINT curve_sample_rate_hz_check CHECK ((sample_rate_hz > (0)::double precision))
 );
 
@@ -427,6 +442,56 @@ CREATE TABLE public.membership (
 
 ALTER TABLE ONLY public.membership FORCE ROW LEVEL SECURITY;
 
+CREATE TABLE public.notebook_entry (
+    id uuid NOT NULL,
+    academy_id uuid NOT NULL,
+    athlete_id uuid NOT NULL,
+    author_id uuid NOT NULL,
+    body text NOT NULL,
+    made_at timestamp with time zone DEFAULT clock_timestamp() NOT NULL,
+    struck_at timestamp with time zone,
+    struck_by uuid,
+    CONSTRAINT notebook_entry_body_check CHECK (((length(body) >= 1) AND (length(body) <= 4000)))
+);
+
+ALTER TABLE ONLY public.notebook_entry FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.notice (
+    id uuid DEFAULT gen_random_uuid() NOT NULL,
+    academy_id uuid NOT NULL,
+    person_id uuid NOT NULL,
+    kind text NOT NULL,
+    text text NOT NULL,
+    link text NOT NULL,
+    made_at timestamp with time zone DEFAULT clock_timestamp() NOT NULL,
+    read_at timestamp with time zone,
+    CONSTRAINT notice_link_check CHECK ((link ~~ '/%'::text)),
+    CONSTRAINT notice_text_check CHECK (((length(text) >= 1) AND (length(text) <= 300)))
+);
+
+ALTER TABLE ONLY public.notice FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.outbox (
+    id uuid DEFAULT gen_random_uuid() NOT NULL,
+    academy_id uuid NOT NULL,
+    kind text NOT NULL,
+    person_id uuid,
+    address text,
+    payload jsonb NOT NULL,
+    message_key text NOT NULL,
+    state text DEFAULT 'queued'::text NOT NULL,
+    attempts integer DEFAULT 0 NOT NULL,
+    last_answer text,
+    not_before timestamp with time zone DEFAULT now() NOT NULL,
+    claimed_at timestamp with time zone,
+    made_at timestamp with time zone DEFAULT now() NOT NULL,
+    sent_at timestamp with time zone,
+    CONSTRAINT outbox_check CHECK (((person_id IS NULL) <> (address IS NULL))),
+    CONSTRAINT outbox_state_check CHECK ((state = ANY (ARRAY['queued'::text, 'sending'::text, 'sent'::text, 'failed'::text, 'unknown'::text])))
+);
+
+ALTER TABLE ONLY public.outbox FORCE ROW LEVEL SECURITY;
+
 CREATE TABLE public.outrun (
     id uuid DEFAULT gen_random_uuid() NOT NULL,
     academy_id uuid NOT NULL,
@@ -483,6 +548,18 @@ CREATE TABLE public.outrun_note (
 
 ALTER TABLE ONLY public.outrun_note FORCE ROW LEVEL SECURITY;
 
+CREATE TABLE public.outrun_tick (
+    academy_id uuid NOT NULL,
+    athlete_id uuid NOT NULL,
+    outrun_id uuid NOT NULL,
+    statement text NOT NULL,
+    ticked_by uuid NOT NULL,
+    ticked_at timestamp with time zone DEFAULT now() NOT NULL,
+    CONSTRAINT outrun_tick_statement_check CHECK (((length(statement) >= 1) AND (length(statement) <= 300)))
+);
+
+ALTER TABLE ONLY public.outrun_tick FORCE ROW LEVEL SECURITY;
+
 CREATE TABLE public.person (
     id uuid DEFAULT gen_random_uuid() NOT NULL,
     given_name text NOT NULL,
@@ -531,6 +608,20 @@ CREATE TABLE public.restriction (
 );
 
 ALTER TABLE ONLY public.restriction FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.retest_request (
+    id uuid DEFAULT gen_random_uuid() NOT NULL,
+    academy_id uuid NOT NULL,
+    athlete_id uuid NOT NULL,
+    asked_by uuid NOT NULL,
+    asked_at timestamp with time zone DEFAULT now() NOT NULL,
+    note text DEFAULT ''::text NOT NULL,
+    done_at timestamp with time zone,
+    done_by uuid,
+    CONSTRAINT retest_request_note_check CHECK ((length(note) <= 500))
+);
+
+ALTER TABLE ONLY public.retest_request FORCE ROW LEVEL SECURITY;
 
 CREATE TABLE public.session (
     id uuid DEFAULT gen_random_uuid() NOT NULL,
@@ -648,10 +739,49 @@ CREATE TABLE public.testing_day (
     closed_at timestamp with time zone,
     closed_by uuid,
     recorded_by uuid,
+    note text DEFAULT ''::text NOT NULL,
+    CONSTRAINT testing_day_note_check CHECK ((length(note) <= 2000)),
     CONSTRAINT testing_day_state_check CHECK ((state = ANY (ARRAY['open'::text, 'closed'::text])))
 );
 
 ALTER TABLE ONLY public.testing_day FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.testing_day_athlete (
+    academy_id uuid NOT NULL,
+    testing_day_id uuid NOT NULL,
+    athlete_id uuid NOT NULL,
+    state text DEFAULT 'expected'::text NOT NULL,
+    note text DEFAULT ''::text NOT NULL,
+    version integer DEFAULT 1 NOT NULL,
+    CONSTRAINT testing_day_athlete_note_check CHECK ((length(note) <= 500)),
+    CONSTRAINT testing_day_athlete_state_check CHECK ((state = ANY (ARRAY['expected'::text, 'absent'::text])))
+);
+
+ALTER TABLE ONLY public.testing_day_athlete FORCE ROW LEVEL SECURITY;
+
+CREATE TABLE public.token (
+    id uuid DEFAULT gen_random_uuid() NOT NULL,
+    token_hash bytea NOT NULL,
+    kind text NOT NULL,
+    academy_id uuid,
+    email text,
+    role public.role,
+    person_id uuid,
+    squad_ids uuid[] DEFAULT '{}'::uuid[] NOT NULL,
+    athlete_ids uuid[] DEFAULT '{}'::uuid[] NOT NULL,
+    made_by uuid,
+    made_at timestamp with time zone DEFAULT now() NOT NULL,
+    expires_at timestamp with time zone NOT NULL,
+    used_at timestamp with time zone,
+    revoked_at timestamp with time zone,
+    CONSTRAINT token_check CHECK (((kind <> 'invite'::text) OR ((academy_id IS NOT NULL) AND (email IS NOT NULL) AND (role IS NOT NULL)))),
+    CONSTRAINT token_check1 CHECK (((kind <> 'reset'::text) OR (person_id IS NOT NULL))),
+    CONSTRAINT token_email_check CHECK ((email = lower(email))),
+    CONSTRAINT token_kind_check CHECK ((kind = ANY (ARRAY['invite'::text, 'reset'::text]))),
+    CONSTRAINT token_token_hash_check CHECK ((length(token_hash) = 32))
+);
+
+ALTER TABLE ONLY public.token FORCE ROW LEVEL SECURITY;
 
 CREATE TABLE public.trial (
     id uuid NOT NULL,
@@ -673,9 +803,11 @@ CREATE TABLE public.trial (
     recorded_by uuid,
     recorded_at timestamp with time zone DEFAULT now() NOT NULL,
     origin text,
+    note text DEFAULT ''::text NOT NULL,
     CONSTRAINT trial_attempt_check CHECK (((attempt >= 1) AND (attempt <= 9))),
     CONSTRAINT trial_check CHECK (((state <> 'asked'::public.trial_state) OR (asked_reason IS NOT NULL))),
     CONSTRAINT trial_check1 CHECK (((state <> 'void'::public.trial_state) OR (void_reason IS NOT NULL))),
+    CONSTRAINT trial_note_check CHECK ((length(note) <= 500)),
     CONSTRAINT trial_value_si_check CHECK (((value_si >= (0)::double precision) AND (value_si < ('1000000'::numeric)::double precision)))
 );
 
@@ -707,6 +839,12 @@ ALTER TABLE ONLY public.battery
 
 ALTER TABLE ONLY public.battery_test
     ADD CONSTRAINT battery_test_pkey PRIMARY KEY (battery_id, test_id);
+
+ALTER TABLE ONLY public.column_mapping
+    ADD CONSTRAINT column_mapping_academy_id_kind_name_key UNIQUE (academy_id, kind, name);
+
+ALTER TABLE ONLY public.column_mapping
+    ADD CONSTRAINT column_mapping_pkey PRIMARY KEY (id);
 
 ALTER TABLE ONLY public.credential
     ADD CONSTRAINT credential_pkey PRIMARY KEY (person_id);
@@ -774,6 +912,18 @@ ALTER TABLE ONLY public.membership
 ALTER TABLE ONLY public.membership
     ADD CONSTRAINT membership_pkey PRIMARY KEY (id);
 
+ALTER TABLE ONLY public.notebook_entry
+    ADD CONSTRAINT notebook_entry_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.notice
+    ADD CONSTRAINT notice_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.outbox
+    ADD CONSTRAINT outbox_academy_id_message_key_key UNIQUE (academy_id, message_key);
+
+ALTER TABLE ONLY public.outbox
+    ADD CONSTRAINT outbox_pkey PRIMARY KEY (id);
+
 ALTER TABLE ONLY public.outrun_event
     ADD CONSTRAINT outrun_event_pkey PRIMARY KEY (id);
 
@@ -782,6 +932,9 @@ ALTER TABLE ONLY public.outrun_note
 
 ALTER TABLE ONLY public.outrun
     ADD CONSTRAINT outrun_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.outrun_tick
+    ADD CONSTRAINT outrun_tick_pkey PRIMARY KEY (outrun_id, statement);
 
 ALTER TABLE ONLY public.person_contact
     ADD CONSTRAINT person_contact_email_key UNIQUE (email);
@@ -803,6 +956,9 @@ ALTER TABLE ONLY public.policy_version
 
 ALTER TABLE ONLY public.restriction
     ADD CONSTRAINT restriction_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.retest_request
+    ADD CONSTRAINT retest_request_pkey PRIMARY KEY (id);
 
 ALTER TABLE ONLY public.session
     ADD CONSTRAINT session_pkey PRIMARY KEY (id);
@@ -837,11 +993,20 @@ ALTER TABLE ONLY public.test
 ALTER TABLE ONLY public.test
     ADD CONSTRAINT test_pkey PRIMARY KEY (id);
 
+ALTER TABLE ONLY public.testing_day_athlete
+    ADD CONSTRAINT testing_day_athlete_pkey PRIMARY KEY (testing_day_id, athlete_id);
+
 ALTER TABLE ONLY public.testing_day
     ADD CONSTRAINT testing_day_pkey PRIMARY KEY (id);
 
 ALTER TABLE ONLY public.testing_day
     ADD CONSTRAINT testing_day_squad_id_battery_id_held_on_key UNIQUE (squad_id, battery_id, held_on);
+
+ALTER TABLE ONLY public.token
+    ADD CONSTRAINT token_pkey PRIMARY KEY (id);
+
+ALTER TABLE ONLY public.token
+    ADD CONSTRAINT token_token_hash_key UNIQUE (token_hash);
 
 ALTER TABLE ONLY public.trial
     ADD CONSTRAINT trial_pkey PRIMARY KEY (id);
@@ -867,6 +1032,12 @@ CREATE INDEX judgement_athlete ON public.judgement USING btree (athlete_id, made
 
 CREATE INDEX membership_person ON public.membership USING btree (person_id) WHERE (ended_at IS NULL);
 
+CREATE INDEX notebook_entry_athlete ON public.notebook_entry USING btree (athlete_id, made_at DESC);
+
+CREATE INDEX notice_person ON public.notice USING btree (person_id, made_at DESC) WHERE (read_at IS NULL);
+
+CREATE INDEX outbox_waiting ON public.outbox USING btree (academy_id, made_at) WHERE (state = ANY (ARRAY['queued'::text, 'sending'::text]));
+
 CREATE INDEX outrun_academy ON public.outrun USING btree (academy_id, state, raised_on DESC);
 
 CREATE INDEX outrun_event_outrun ON public.outrun_event USING btree (outrun_id, made_at);
@@ -877,6 +1048,8 @@ CREATE UNIQUE INDEX outrun_open ON public.outrun USING btree (athlete_id) WHERE 
 
 CREATE INDEX restriction_athlete ON public.restriction USING btree (athlete_id) WHERE (cleared_at IS NULL);
 
+CREATE UNIQUE INDEX retest_request_open ON public.retest_request USING btree (athlete_id) WHERE (done_at IS NULL);
+
 CREATE INDEX session_person ON public.session USING btree (person_id) WHERE (revoked_at IS NULL);
 
 CREATE INDEX shot_athlete ON public.shot USING btree (athlete_id, driver_session_id) WHERE (club = 'driver'::text);
@@ -884,6 +1057,8 @@ CREATE INDEX shot_athlete ON public.shot USING btree (athlete_id, driver_session
 CREATE INDEX squad_coach_person ON public.squad_coach USING btree (person_id, academy_id);
 
 CREATE INDEX testing_day_held ON public.testing_day USING btree (academy_id, held_on DESC);
+
+CREATE INDEX token_invites ON public.token USING btree (academy_id, made_at DESC) WHERE ((kind = 'invite'::text) AND (used_at IS NULL));
 
 CREATE INDEX trial_asked ON public.trial USING btree (academy_id, athlete_id) WHERE (state = 'asked'::public.trial_state);
 
@@ -913,6 +1088,12 @@ ALTER TABLE ONLY public.battery_test
 ALTER TABLE ONLY public.battery_test
     ADD CONSTRAINT battery_test_test_id_fkey FOREIGN KEY (test_id) REFERENCES public.test(id);
 
+ALTER TABLE ONLY public.column_mapping
+    ADD CONSTRAINT column_mapping_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.column_mapping
+    ADD CONSTRAINT column_mapping_made_by_fkey FOREIGN KEY (made_by) REFERENCES public.person(id);
+
 ALTER TABLE ONLY public.credential
     ADD CONSTRAINT credential_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
 
@@ -933,6 +1114,9 @@ ALTER TABLE ONLY public.curve
 
 ALTER TABLE ONLY public.curve
     ADD CONSTRAINT curve_testing_day_id_fkey FOREIGN KEY (testing_day_id) REFERENCES public.testing_day(id);
+
+ALTER TABLE ONLY public.curve
+    ADD CONSTRAINT curve_trial_id_fkey FOREIGN KEY (trial_id) REFERENCES public.trial(id);
 
 ALTER TABLE ONLY public.device
     ADD CONSTRAINT device_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
@@ -1036,6 +1220,30 @@ ALTER TABLE ONLY public.membership
 ALTER TABLE ONLY public.membership
     ADD CONSTRAINT membership_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
 
+ALTER TABLE ONLY public.notebook_entry
+    ADD CONSTRAINT notebook_entry_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.notebook_entry
+    ADD CONSTRAINT notebook_entry_athlete_id_fkey FOREIGN KEY (athlete_id) REFERENCES public.athlete(id);
+
+ALTER TABLE ONLY public.notebook_entry
+    ADD CONSTRAINT notebook_entry_author_id_fkey FOREIGN KEY (author_id) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.notebook_entry
+    ADD CONSTRAINT notebook_entry_struck_by_fkey FOREIGN KEY (struck_by) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.notice
+    ADD CONSTRAINT notice_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.notice
+    ADD CONSTRAINT notice_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.outbox
+    ADD CONSTRAINT outbox_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.outbox
+    ADD CONSTRAINT outbox_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
+
 ALTER TABLE ONLY public.outrun
     ADD CONSTRAINT outrun_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
 
@@ -1075,6 +1283,18 @@ ALTER TABLE ONLY public.outrun_note
 ALTER TABLE ONLY public.outrun_note
     ADD CONSTRAINT outrun_note_outrun_id_fkey FOREIGN KEY (outrun_id) REFERENCES public.outrun(id);
 
+ALTER TABLE ONLY public.outrun_tick
+    ADD CONSTRAINT outrun_tick_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.outrun_tick
+    ADD CONSTRAINT outrun_tick_athlete_id_fkey FOREIGN KEY (athlete_id) REFERENCES public.athlete(id);
+
+ALTER TABLE ONLY public.outrun_tick
+    ADD CONSTRAINT outrun_tick_outrun_id_fkey FOREIGN KEY (outrun_id) REFERENCES public.outrun(id);
+
+ALTER TABLE ONLY public.outrun_tick
+    ADD CONSTRAINT outrun_tick_ticked_by_fkey FOREIGN KEY (ticked_by) REFERENCES public.person(id);
+
 ALTER TABLE ONLY public.person_contact
     ADD CONSTRAINT person_contact_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
 
@@ -1095,6 +1315,18 @@ ALTER TABLE ONLY public.restriction
 
 ALTER TABLE ONLY public.restriction
     ADD CONSTRAINT restriction_set_by_fkey FOREIGN KEY (set_by) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.retest_request
+    ADD CONSTRAINT retest_request_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.retest_request
+    ADD CONSTRAINT retest_request_asked_by_fkey FOREIGN KEY (asked_by) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.retest_request
+    ADD CONSTRAINT retest_request_athlete_id_fkey FOREIGN KEY (athlete_id) REFERENCES public.athlete(id);
+
+ALTER TABLE ONLY public.retest_request
+    ADD CONSTRAINT retest_request_done_by_fkey FOREIGN KEY (done_by) REFERENCES public.person(id);
 
 ALTER TABLE ONLY public.session
     ADD CONSTRAINT session_membership_id_fkey FOREIGN KEY (membership_id) REFERENCES public.membership(id);
@@ -1135,6 +1367,15 @@ ALTER TABLE ONLY public.test
 ALTER TABLE ONLY public.testing_day
     ADD CONSTRAINT testing_day_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
 
+ALTER TABLE ONLY public.testing_day_athlete
+    ADD CONSTRAINT testing_day_athlete_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.testing_day_athlete
+    ADD CONSTRAINT testing_day_athlete_athlete_id_fkey FOREIGN KEY (athlete_id) REFERENCES public.athlete(id);
+
+ALTER TABLE ONLY public.testing_day_athlete
+    ADD CONSTRAINT testing_day_athlete_testing_day_id_fkey FOREIGN KEY (testing_day_id) REFERENCES public.testing_day(id);
+
 ALTER TABLE ONLY public.testing_day
     ADD CONSTRAINT testing_day_battery_id_fkey FOREIGN KEY (battery_id) REFERENCES public.battery(id);
 
@@ -1146,6 +1387,15 @@ ALTER TABLE ONLY public.testing_day
 
 ALTER TABLE ONLY public.testing_day
     ADD CONSTRAINT testing_day_squad_id_fkey FOREIGN KEY (squad_id) REFERENCES public.squad(id);
+
+ALTER TABLE ONLY public.token
+    ADD CONSTRAINT token_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
+
+ALTER TABLE ONLY public.token
+    ADD CONSTRAINT token_made_by_fkey FOREIGN KEY (made_by) REFERENCES public.person(id);
+
+ALTER TABLE ONLY public.token
+    ADD CONSTRAINT token_person_id_fkey FOREIGN KEY (person_id) REFERENCES public.person(id);
 
 ALTER TABLE ONLY public.trial
     ADD CONSTRAINT trial_academy_id_fkey FOREIGN KEY (academy_id) REFERENCES public.academy(id);
@@ -1178,6 +1428,10 @@ CREATE POLICY academy_read ON public.academy FOR SELECT TO marram_app USING (((i
 ALTER TABLE public.athlete ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY athlete_add ON public.athlete FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
+
+CREATE POLICY athlete_auth ON public.athlete FOR SELECT TO marram_auth USING (true);
+
+CREATE POLICY athlete_auth_sign_in ON public.athlete FOR UPDATE TO marram_auth USING ((person_id IS NULL)) WITH CHECK ((person_id IS NOT NULL));
 
 CREATE POLICY athlete_change ON public.athlete FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as) AND (id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
@@ -1218,6 +1472,16 @@ CREATE POLICY battery_test_change ON public.battery_test FOR UPDATE TO marram_ap
 CREATE POLICY battery_test_job ON public.battery_test TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
 
 CREATE POLICY battery_test_read ON public.battery_test FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role, 'guardian'::public.role, 'athlete'::public.role]) AS acts_as)));
+
+ALTER TABLE public.column_mapping ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY column_mapping_add ON public.column_mapping FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as)));
+
+CREATE POLICY column_mapping_change ON public.column_mapping FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as)));
+
+CREATE POLICY column_mapping_job ON public.column_mapping TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY column_mapping_read ON public.column_mapping FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as)));
 
 ALTER TABLE public.credential ENABLE ROW LEVEL SECURITY;
 
@@ -1312,6 +1576,12 @@ ALTER TABLE public.guardianship ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY guardianship_add ON public.guardianship FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
+CREATE POLICY guardianship_auth ON public.guardianship FOR SELECT TO marram_auth USING (true);
+
+CREATE POLICY guardianship_auth_add ON public.guardianship FOR INSERT TO marram_auth WITH CHECK (true);
+
+CREATE POLICY guardianship_auth_restart ON public.guardianship FOR UPDATE TO marram_auth USING (true) WITH CHECK ((ended_at IS NULL));
+
 CREATE POLICY guardianship_change ON public.guardianship FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
 CREATE POLICY guardianship_job ON public.guardianship TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
@@ -1354,11 +1624,45 @@ CREATE POLICY membership_add ON public.membership FOR INSERT TO marram_app WITH 
 
 CREATE POLICY membership_auth ON public.membership FOR SELECT TO marram_auth USING (true);
 
+CREATE POLICY membership_auth_add ON public.membership FOR INSERT TO marram_auth WITH CHECK (true);
+
+CREATE POLICY membership_auth_restart ON public.membership FOR UPDATE TO marram_auth USING (true) WITH CHECK ((ended_at IS NULL));
+
 CREATE POLICY membership_change ON public.membership FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
 CREATE POLICY membership_job ON public.membership TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
 
 CREATE POLICY membership_read ON public.membership FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND (( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as) OR ((person_id = ( SELECT app.person_id() AS person_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['strength_coach'::public.role, 'swing_coach'::public.role, 'guardian'::public.role, 'athlete'::public.role]) AS acts_as)))));
+
+ALTER TABLE public.notebook_entry ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY notebook_entry_add ON public.notebook_entry FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY notebook_entry_change ON public.notebook_entry FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY notebook_entry_job ON public.notebook_entry TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY notebook_entry_read ON public.notebook_entry FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+ALTER TABLE public.notice ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY notice_add ON public.notice FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as)));
+
+CREATE POLICY notice_change ON public.notice FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND (person_id = ( SELECT app.person_id() AS person_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role, 'guardian'::public.role, 'athlete'::public.role]) AS acts_as)));
+
+CREATE POLICY notice_job ON public.notice TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY notice_read ON public.notice FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND (person_id = ( SELECT app.person_id() AS person_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role, 'guardian'::public.role, 'athlete'::public.role]) AS acts_as)));
+
+ALTER TABLE public.outbox ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY outbox_add ON public.outbox FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as)));
+
+CREATE POLICY outbox_auth ON public.outbox FOR INSERT TO marram_auth WITH CHECK ((kind = 'reset'::text));
+
+CREATE POLICY outbox_job ON public.outbox TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY outbox_read ON public.outbox FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
 ALTER TABLE public.outrun ENABLE ROW LEVEL SECURITY;
 
@@ -1390,13 +1694,29 @@ CREATE POLICY outrun_note_read ON public.outrun_note FOR SELECT TO marram_app US
 
 CREATE POLICY outrun_read ON public.outrun FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
 
+ALTER TABLE public.outrun_tick ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY outrun_tick_add ON public.outrun_tick FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY outrun_tick_change ON public.outrun_tick FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY outrun_tick_drop ON public.outrun_tick FOR DELETE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY outrun_tick_job ON public.outrun_tick TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY outrun_tick_read ON public.outrun_tick FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
 ALTER TABLE public.person ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY person_auth ON public.person FOR SELECT TO marram_auth USING (true);
 
+CREATE POLICY person_auth_add ON public.person FOR INSERT TO marram_auth WITH CHECK (true);
+
 ALTER TABLE public.person_contact ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY person_contact_auth ON public.person_contact FOR SELECT TO marram_auth USING (true);
+
+CREATE POLICY person_contact_auth_add ON public.person_contact FOR INSERT TO marram_auth WITH CHECK (true);
 
 CREATE POLICY person_contact_job ON public.person_contact FOR SELECT TO marram_job USING ((EXISTS ( SELECT
    FROM public.membership m
@@ -1430,6 +1750,16 @@ CREATE POLICY restriction_job ON public.restriction TO marram_job USING ((academ
 
 CREATE POLICY restriction_read ON public.restriction FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role, 'guardian'::public.role, 'athlete'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
 
+ALTER TABLE public.retest_request ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY retest_request_add ON public.retest_request FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY retest_request_change ON public.retest_request FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY retest_request_job ON public.retest_request TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY retest_request_read ON public.retest_request FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
 ALTER TABLE public.session ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY session_auth ON public.session TO marram_auth USING (true) WITH CHECK (true);
@@ -1453,6 +1783,8 @@ CREATE POLICY squad_change ON public.squad FOR UPDATE TO marram_app USING (((aca
 ALTER TABLE public.squad_coach ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY squad_coach_add ON public.squad_coach FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
+
+CREATE POLICY squad_coach_auth_add ON public.squad_coach FOR INSERT TO marram_auth WITH CHECK (true);
 
 CREATE POLICY squad_coach_drop ON public.squad_coach FOR DELETE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
 
@@ -1488,11 +1820,33 @@ ALTER TABLE public.testing_day ENABLE ROW LEVEL SECURITY;
 
 CREATE POLICY testing_day_add ON public.testing_day FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (squad_id IN ( SELECT app.visible_squads() AS visible_squads))));
 
+ALTER TABLE public.testing_day_athlete ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY testing_day_athlete_add ON public.testing_day_athlete FOR INSERT TO marram_app WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY testing_day_athlete_change ON public.testing_day_athlete FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY testing_day_athlete_drop ON public.testing_day_athlete FOR DELETE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
+CREATE POLICY testing_day_athlete_job ON public.testing_day_athlete TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
+
+CREATE POLICY testing_day_athlete_read ON public.testing_day_athlete FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role, 'swing_coach'::public.role]) AS acts_as) AND (athlete_id IN ( SELECT app.visible_athletes() AS visible_athletes))));
+
 CREATE POLICY testing_day_change ON public.testing_day FOR UPDATE TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (squad_id IN ( SELECT app.visible_squads() AS visible_squads)))) WITH CHECK (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role, 'strength_coach'::public.role]) AS acts_as) AND (squad_id IN ( SELECT app.visible_squads() AS visible_squads))));
 
 CREATE POLICY testing_day_job ON public.testing_day TO marram_job USING ((academy_id = ( SELECT app.academy_id() AS academy_id))) WITH CHECK ((academy_id = ( SELECT app.academy_id() AS academy_id)));
 
 CREATE POLICY testing_day_read ON public.testing_day FOR SELECT TO marram_app USING (((academy_id = ( SELECT app.academy_id() AS academy_id)) AND (squad_id IN ( SELECT app.visible_squads() AS visible_squads))));
+
+ALTER TABLE public.token ENABLE ROW LEVEL SECURITY;
+
+CREATE POLICY token_add ON public.token FOR INSERT TO marram_app WITH CHECK (((kind = 'invite'::text) AND (academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
+
+CREATE POLICY token_auth ON public.token TO marram_auth USING (true) WITH CHECK (true);
+
+CREATE POLICY token_read ON public.token FOR SELECT TO marram_app USING (((kind = 'invite'::text) AND (academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as)));
+
+CREATE POLICY token_revoke ON public.token FOR UPDATE TO marram_app USING (((kind = 'invite'::text) AND (academy_id = ( SELECT app.academy_id() AS academy_id)) AND ( SELECT app.acts_as(VARIADIC ARRAY['director'::public.role]) AS acts_as))) WITH CHECK (((kind = 'invite'::text) AND (academy_id = ( SELECT app.academy_id() AS academy_id))));
 
 ALTER TABLE public.trial ENABLE ROW LEVEL SECURITY;
 
@@ -1522,6 +1876,7 @@ GRANT ALL ON FUNCTION app.acts_as(VARIADIC roles public.role[]) TO marram_app;
 REVOKE ALL ON FUNCTION app.enqueue(task text, payload jsonb, job_key text) FROM PUBLIC;
 GRANT ALL ON FUNCTION app.enqueue(task text, payload jsonb, job_key text) TO marram_app;
 GRANT ALL ON FUNCTION app.enqueue(task text, payload jsonb, job_key text) TO marram_job;
+GRANT ALL ON FUNCTION app.enqueue(task text, payload jsonb, job_key text) TO marram_auth;
 
 REVOKE ALL ON FUNCTION app.programme_figures(except_athletes uuid[], as_of date) FROM PUBLIC;
 GRANT ALL ON FUNCTION app.programme_figures(except_athletes uuid[], as_of date) TO marram_app;
@@ -1553,6 +1908,16 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.athlete TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.athlete TO marram_app;
 GRANT SELECT ON TABLE public.athlete TO marram_backup;
 
+GRANT SELECT(id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(academy_id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(person_id),UPDATE(person_id) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(given_name) ON TABLE public.athlete TO marram_auth;
+
+GRANT SELECT(family_name) ON TABLE public.athlete TO marram_auth;
+
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.attempt_limit TO marram_auth;
 GRANT SELECT ON TABLE public.attempt_limit TO marram_backup;
 
@@ -1570,6 +1935,10 @@ GRANT SELECT ON TABLE public.battery TO marram_backup;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.battery_test TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.battery_test TO marram_app;
 GRANT SELECT ON TABLE public.battery_test TO marram_backup;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.column_mapping TO marram_job;
+GRANT SELECT,INSERT,UPDATE ON TABLE public.column_mapping TO marram_app;
+GRANT SELECT ON TABLE public.column_mapping TO marram_backup;
 
 GRANT SELECT,INSERT,UPDATE ON TABLE public.credential TO marram_auth;
 GRANT SELECT ON TABLE public.credential TO marram_backup;
@@ -1608,7 +1977,10 @@ GRANT SELECT ON TABLE public.guardian_address TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.guardianship TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.guardianship TO marram_app;
+GRANT SELECT,INSERT ON TABLE public.guardianship TO marram_auth;
 GRANT SELECT ON TABLE public.guardianship TO marram_backup;
+
+GRANT UPDATE(ended_at) ON TABLE public.guardianship TO marram_auth;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.handedness TO marram_job;
 GRANT SELECT,INSERT ON TABLE public.handedness TO marram_app;
@@ -1624,8 +1996,25 @@ GRANT SELECT ON TABLE public.judgement TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.membership TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.membership TO marram_app;
-GRANT SELECT ON TABLE public.membership TO marram_auth;
+GRANT SELECT,INSERT ON TABLE public.membership TO marram_auth;
 GRANT SELECT ON TABLE public.membership TO marram_backup;
+
+GRANT UPDATE(ended_at) ON TABLE public.membership TO marram_auth;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.notebook_entry TO marram_job;
+GRANT SELECT,INSERT,UPDATE ON TABLE public.notebook_entry TO marram_app;
+GRANT SELECT ON TABLE public.notebook_entry TO marram_backup;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.notice TO marram_job;
+GRANT SELECT,INSERT ON TABLE public.notice TO marram_app;
+GRANT SELECT ON TABLE public.notice TO marram_backup;
+
+GRANT UPDATE(read_at) ON TABLE public.notice TO marram_app;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outbox TO marram_job;
+GRANT SELECT,INSERT ON TABLE public.outbox TO marram_app;
+GRANT INSERT ON TABLE public.outbox TO marram_auth;
+GRANT SELECT ON TABLE public.outbox TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outrun TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.outrun TO marram_app;
@@ -1639,13 +2028,17 @@ GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outrun_note TO marram_job;
 GRANT SELECT,INSERT ON TABLE public.outrun_note TO marram_app;
 GRANT SELECT ON TABLE public.outrun_note TO marram_backup;
 
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outrun_tick TO marram_job;
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.outrun_tick TO marram_app;
+GRANT SELECT ON TABLE public.outrun_tick TO marram_backup;
+
 GRANT SELECT ON TABLE public.person TO marram_app;
-GRANT SELECT ON TABLE public.person TO marram_auth;
+GRANT SELECT,INSERT ON TABLE public.person TO marram_auth;
 GRANT SELECT ON TABLE public.person TO marram_job;
 GRANT SELECT ON TABLE public.person TO marram_backup;
 
 GRANT SELECT ON TABLE public.person_contact TO marram_app;
-GRANT SELECT ON TABLE public.person_contact TO marram_auth;
+GRANT SELECT,INSERT ON TABLE public.person_contact TO marram_auth;
 GRANT SELECT ON TABLE public.person_contact TO marram_job;
 GRANT SELECT ON TABLE public.person_contact TO marram_backup;
 
@@ -1656,6 +2049,10 @@ GRANT SELECT ON TABLE public.policy_version TO marram_backup;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.restriction TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.restriction TO marram_app;
 GRANT SELECT ON TABLE public.restriction TO marram_backup;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.retest_request TO marram_job;
+GRANT SELECT,INSERT,UPDATE ON TABLE public.retest_request TO marram_app;
+GRANT SELECT ON TABLE public.retest_request TO marram_backup;
 
 GRANT SELECT,INSERT,UPDATE ON TABLE public.session TO marram_auth;
 GRANT SELECT ON TABLE public.session TO marram_backup;
@@ -1670,6 +2067,7 @@ GRANT SELECT ON TABLE public.squad TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.squad_coach TO marram_job;
 GRANT SELECT,INSERT,DELETE ON TABLE public.squad_coach TO marram_app;
+GRANT INSERT ON TABLE public.squad_coach TO marram_auth;
 GRANT SELECT ON TABLE public.squad_coach TO marram_backup;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.term TO marram_job;
@@ -1683,6 +2081,16 @@ GRANT SELECT ON TABLE public.test TO marram_backup;
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.testing_day TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.testing_day TO marram_app;
 GRANT SELECT ON TABLE public.testing_day TO marram_backup;
+
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.testing_day_athlete TO marram_job;
+GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.testing_day_athlete TO marram_app;
+GRANT SELECT ON TABLE public.testing_day_athlete TO marram_backup;
+
+GRANT SELECT,INSERT ON TABLE public.token TO marram_app;
+GRANT SELECT,INSERT,UPDATE ON TABLE public.token TO marram_auth;
+GRANT SELECT ON TABLE public.token TO marram_backup;
+
+GRANT UPDATE(revoked_at) ON TABLE public.token TO marram_app;
 
 GRANT SELECT,INSERT,DELETE,UPDATE ON TABLE public.trial TO marram_job;
 GRANT SELECT,INSERT,UPDATE ON TABLE public.trial TO marram_app;

@@ -24,6 +24,9 @@ const MAP = {
   'outrun:see': ['director', 'strength_coach', 'swing_coach'],
   'outrun:judge': ['director', 'strength_coach', 'swing_coach'],
   'season:import': ['director'],
+  'people:manage': ['director'],
+  'programme:manage': ['director'],
+  'child-sign-in:make': ['guardian'],
 } as const satisfies Record<string, readonly Role[]>;
 
 export type Permission = keyof typeof MAP;

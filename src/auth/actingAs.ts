@@ -1,6 +1,5 @@
-import { encode } from '@auth/core/jwt';
 import type { Viewer } from '#src/access/viewer.ts';
-import { SESSION_COOKIE, SESSION_MAX_AGE_S } from '#src/auth/cookies.ts';
+import { sealSession } from '#src/auth/sealSession.ts';
 import { hashToken, makeToken } from '#src/auth/token.ts';
 import { authDb } from '#src/db/client.ts';
 import { turnSession } from '#src/db/queries/sessions.ts';
@@ -16,10 +15,5 @@ export async function actAs(viewer: Viewer, membershipId: string): Promise<strin
   const { sessionId, personId } = viewer;
   const turned = await turnSession(authDb(), { sessionId, personId, membershipId, tokenHash: hashToken(token) });
   if (!turned) notFound('membership');
-  return encode({
-    token: { sid: token },
-    secret: process.env['AUTH_SECRET'] ?? '',
-    salt: SESSION_COOKIE,
-    maxAge: SESSION_MAX_AGE_S,
-  });
+  return sealSession(token);
 }

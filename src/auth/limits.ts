@@ -22,6 +22,7 @@ function makeLimiter(keyPrefix: string, points: number, duration: number): RateL
 const QUARTER_HOUR_S = 15 * 60;
 const ACCOUNT_TRIES = 8;
 const ADDRESS_TRIES = 60;
+const RESETS_ASKED = 5;
 const METHOD_A_MINUTE = 120;
 
 const limiters = new Map<string, RateLimiterPostgres>();
@@ -37,6 +38,9 @@ const keyOf = (text: string): string => createHash('sha256').update(text).digest
 
 const account = () => limiter('sign-in-name', ACCOUNT_TRIES, QUARTER_HOUR_S);
 const address = () => limiter('sign-in-address', ADDRESS_TRIES, QUARTER_HOUR_S);
+const reset = () => limiter('reset', RESETS_ASKED, QUARTER_HOUR_S);
+const link = () => limiter('link', ADDRESS_TRIES, QUARTER_HOUR_S);
+const present = () => limiter('present', ACCOUNT_TRIES, QUARTER_HOUR_S);
 const method = () => limiter('method', Number(process.env['METHOD_LIMIT_PER_MINUTE'] ?? METHOD_A_MINUTE), 60);
 
 async function consume(limit: RateLimiterPostgres, key: string): Promise<void> {
@@ -58,6 +62,30 @@ export async function consumeSignIn(name: string, clientAddress: string): Promis
   await consume(address(), clientAddress);
   await consume(account(), name);
 }
+
+/**
+ * Counts one asking for a new password, whether the address is anyone's or not.
+ *
+ * @throws {AppError} too-many, for the e-mail or for the address it is asked from
+ */
+export async function consumeReset(email: string, fromAddress: string): Promise<void> {
+  await consume(link(), fromAddress);
+  await consume(reset(), email);
+}
+
+/**
+ * Counts one use of a link with a token.
+ *
+ * @throws {AppError} too-many
+ */
+export const consumeLink = (fromAddress: string): Promise<void> => consume(link(), fromAddress);
+
+/**
+ * Counts one asking of a signed-in person's present password.
+ *
+ * @throws {AppError} too-many
+ */
+export const consumePresent = (personId: string): Promise<void> => consume(present(), personId);
 
 /** A right password forgets the tries on that name. */
 export const forgiveSignIn = (name: string) => account().delete(keyOf(name));

@@ -75,3 +75,16 @@ export function asJob<T>(academyId: string, work: (trx: Tx) => Promise<T>): Prom
       return work(trx);
     });
 }
+
+/**
+ * The door for what happens before there is a viewer and writes in one academy: an invitation accepted, a password
+ * reset. Policies of this role say which tables.
+ */
+export function asAuth<T>(academyId: string, work: (trx: Tx) => Promise<T>): Promise<T> {
+  return authDb()
+    .transaction()
+    .execute(async (trx) => {
+      await sql`select set_config('app.academy', ${academyId}, true)`.execute(trx);
+      return work(trx);
+    });
+}

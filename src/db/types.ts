@@ -88,6 +88,16 @@ export interface BatteryTest {
   test_id: string;
 }
 
+export interface ColumnMapping {
+  academy_id: string;
+  id: Generated<string>;
+  kind: string;
+  made_at: Generated<Timestamp>;
+  made_by: string | null;
+  mapping: Json;
+  name: string;
+}
+
 export interface Credential {
   changed_at: Generated<Timestamp>;
   password_hash: string;
@@ -111,6 +121,7 @@ export interface Curve {
   source_hash: Buffer;
   test_id: string;
   testing_day_id: string | null;
+  trial_id: string | null;
 }
 
 export interface Device {
@@ -259,6 +270,45 @@ export interface Membership {
   started_at: Generated<Timestamp>;
 }
 
+export interface NotebookEntry {
+  academy_id: string;
+  athlete_id: string;
+  author_id: string;
+  body: string;
+  id: string;
+  made_at: Generated<Timestamp>;
+  struck_at: Timestamp | null;
+  struck_by: string | null;
+}
+
+export interface Notice {
+  academy_id: string;
+  id: Generated<string>;
+  kind: string;
+  link: string;
+  made_at: Generated<Timestamp>;
+  person_id: string;
+  read_at: Timestamp | null;
+  text: string;
+}
+
+export interface Outbox {
+  academy_id: string;
+  address: string | null;
+  attempts: Generated<number>;
+  claimed_at: Timestamp | null;
+  id: Generated<string>;
+  kind: string;
+  last_answer: string | null;
+  made_at: Generated<Timestamp>;
+  message_key: string;
+  not_before: Generated<Timestamp>;
+  payload: Json;
+  person_id: string | null;
+  sent_at: Timestamp | null;
+  state: Generated<string>;
+}
+
 export interface Outrun {
   academy_id: string;
   athlete_id: string;
@@ -301,6 +351,15 @@ export interface OutrunNote {
   outrun_id: string;
 }
 
+export interface OutrunTick {
+  academy_id: string;
+  athlete_id: string;
+  outrun_id: string;
+  statement: string;
+  ticked_at: Generated<Timestamp>;
+  ticked_by: string;
+}
+
 export interface Person {
   created_at: Generated<Timestamp>;
   disabled_at: Timestamp | null;
@@ -334,6 +393,17 @@ export interface Restriction {
   id: Generated<string>;
   set_at: Generated<Timestamp>;
   set_by: string;
+}
+
+export interface RetestRequest {
+  academy_id: string;
+  asked_at: Generated<Timestamp>;
+  asked_by: string;
+  athlete_id: string;
+  done_at: Timestamp | null;
+  done_by: string | null;
+  id: Generated<string>;
+  note: Generated<string>;
 }
 
 export interface Session {
@@ -421,9 +491,36 @@ export interface TestingDay {
   closed_by: string | null;
   held_on: string;
   id: Generated<string>;
+  note: Generated<string>;
   recorded_by: string | null;
   squad_id: string;
   state: Generated<string>;
+}
+
+export interface TestingDayAthlete {
+  academy_id: string;
+  athlete_id: string;
+  note: Generated<string>;
+  state: Generated<string>;
+  testing_day_id: string;
+  version: Generated<number>;
+}
+
+export interface Token {
+  academy_id: string | null;
+  athlete_ids: Generated<string[]>;
+  email: string | null;
+  expires_at: Timestamp;
+  id: Generated<string>;
+  kind: string;
+  made_at: Generated<Timestamp>;
+  made_by: string | null;
+  person_id: string | null;
+  revoked_at: Timestamp | null;
+  role: Role | null;
+  squad_ids: Generated<string[]>;
+  token_hash: Buffer;
+  used_at: Timestamp | null;
 }
 
 export interface Trial {
@@ -434,6 +531,7 @@ export interface Trial {
   entered_unit: string;
   entered_value: string;
   id: string;
+  note: Generated<string>;
   origin: string | null;
   recorded_at: Generated<Timestamp>;
   recorded_by: string | null;
@@ -455,6 +553,7 @@ export interface DB {
   audit: Audit;
   battery: Battery;
   battery_test: BatteryTest;
+  column_mapping: ColumnMapping;
   credential: Credential;
   curve: Curve;
   device: Device;
@@ -469,13 +568,18 @@ export interface DB {
   import_file: ImportFile;
   judgement: Judgement;
   membership: Membership;
+  notebook_entry: NotebookEntry;
+  notice: Notice;
+  outbox: Outbox;
   outrun: Outrun;
   outrun_event: OutrunEvent;
   outrun_note: OutrunNote;
+  outrun_tick: OutrunTick;
   person: Person;
   person_contact: PersonContact;
   policy_version: PolicyVersion;
   restriction: Restriction;
+  retest_request: RetestRequest;
   session: Session;
   shot: Shot;
   squad: Squad;
@@ -483,5 +587,7 @@ export interface DB {
   term: Term;
   test: Test;
   testing_day: TestingDay;
+  testing_day_athlete: TestingDayAthlete;
+  token: Token;
   trial: Trial;
 }

@@ -40,8 +40,14 @@ function answer(work: (context: APIContext) => Promise<unknown>): APIRoute {
 function backToForm({ request, redirect }: APIContext, error: unknown): Response {
   const referer = request.headers.get('referer');
   const page = referer && URL.canParse(referer) ? safePath(new URL(referer).pathname) : '/today';
+  return redirect(`${page}?${problemQuery(error)}`, 303);
+}
+
+/** What a page is told of an error in its address: a code, and the field that it is about. Never words. */
+export function problemQuery(error: unknown): string {
   const code = error instanceof AppError ? error.code : statusOf(error) === 503 ? 'unavailable' : 'failed';
-  return redirect(`${page}?problem=${code}`, 303);
+  const field = error instanceof AppError ? error.fields[0]?.path : undefined;
+  return new URLSearchParams({ problem: code, ...(field ? { field } : {}) }).toString();
 }
 
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;

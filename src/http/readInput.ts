@@ -11,7 +11,8 @@ interface Input<T> {
 
 /**
  * What a person or a script sent, in the shape of `schema`: JSON, or a plain form (every form works without scripts).
- * A form may carry `to`, the page of ours to go on to; empty fields count as not given.
+ * A form may carry `to`, the page of ours to go on to; empty fields count as not given. A field whose name ends in `[]`
+ * is a list, of whatever length.
  *
  * @throws {AppError} invalid
  */
@@ -23,8 +24,12 @@ export async function readInput<S extends z.ZodType>(
   if (!isForm(request)) {
     return { input: await parseBody(request, schema), done: (result) => Response.json(result) };
   }
-  const { to, ...fields } = Object.fromEntries(new URLSearchParams(await request.text()));
-  const given = Object.fromEntries(Object.entries(fields).filter(([, value]) => value !== ''));
+  const params = new URLSearchParams(await request.text());
+  const { to, ...fields } = Object.fromEntries([...params].filter(([name]) => !name.endsWith('[]')));
+  const given: Record<string, string | string[]> = Object.fromEntries(
+    Object.entries(fields).filter(([, value]) => value !== ''),
+  );
+  for (const name of params.keys()) if (name.endsWith('[]')) given[name.slice(0, -2)] = params.getAll(name);
   return { input: parse(given, schema), done: (_, page) => context.redirect(safePath(to, page), 303) };
 }
 

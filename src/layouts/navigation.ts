@@ -2,7 +2,7 @@ import { may } from '#src/access/permissions.ts';
 import type { Viewer } from '#src/access/viewer.ts';
 import type { Permission } from '#src/access/permissions.ts';
 
-export type PlaceKey = 'today' | 'squads' | 'asked' | 'outruns' | 'family' | 'progress' | 'method';
+export type PlaceKey = 'today' | 'squads' | 'asked' | 'outruns' | 'family' | 'progress' | 'programme' | 'method';
 
 interface PlaceLink {
   key: PlaceKey;
@@ -17,6 +17,7 @@ const PLACES: readonly PlaceLink[] = [
   { key: 'squads', href: '/squads', label: 'Squads', permission: 'squad:see' },
   { key: 'asked', href: '/asked', label: 'Asked values', permission: 'trial:settle' },
   { key: 'outruns', href: '/outruns', label: 'Outruns', permission: 'outrun:see' },
+  { key: 'programme', href: '/programme/people', label: 'Programme', permission: 'people:manage' },
   { key: 'family', href: '/family', label: 'Family', permission: 'family:see' },
   { key: 'progress', href: '/my/progress', label: 'Progress', permission: 'own:see' },
   { key: 'method', href: '/method', label: 'Method', permission: null },

@@ -4,6 +4,7 @@ import { addJob } from '#src/db/queries/jobs.ts';
 /** Every job with what it carries: ids alone, never what they stand for. */
 export interface Jobs {
   rejudgeOthers: { academyId: string; exceptIds: string[] };
+  sendMail: { academyId: string };
 }
 
 /**

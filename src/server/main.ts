@@ -3,6 +3,7 @@ import { resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { closeDatabases } from '#src/db/client.ts';
 import { tasks } from '#src/jobs/index.ts';
+import { startDemoMail } from '#src/server/demoMail.ts';
 import { createApp, type PageHandler } from '#src/server/app.ts';
 import { drain, stopOnSignals } from '#src/server/gracefulStop.ts';
 import { captureConsole, createLog } from '#src/server/log.ts';
@@ -34,6 +35,8 @@ await new Promise<void>((done, failed) => {
 });
 log.info({ port: settings.port }, 'listening');
 
+const demoMail = await startDemoMail(process.env);
+
 // Only one process can hold the port, so a worker named after it cannot be alive anywhere else.
 const worker = startWorker({
   connectionString: process.env['DATABASE_JOB_URL'] ?? '',
@@ -45,6 +48,7 @@ const worker = startWorker({
 stopOnSignals(async () => {
   log.info('stopping');
   await Promise.all([drain(server, 10_000), worker.stop()]);
+  await demoMail?.close();
   await closeDatabases();
   log.info('stopped');
 }, 18_000);

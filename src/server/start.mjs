@@ -121,6 +121,7 @@ function announce(port) {
   const accounts = demo ? accountLines(demoAccountsFile) : [];
   if (accounts.length > 0)
     lines.push('', 'Demo accounts (role, e-mail, password):', ...accounts.map((line) => `  ${line}`));
+  if (demo && !dev && !process.env['SMTP_URL']) lines.push('', `Mail of the demo: http://127.0.0.1:${port}/dev/mail`);
   lines.push('', `Log: ${serverLog}`, 'Stop with Ctrl-C', '');
   process.stdout.write(lines.join('\n'));
 }

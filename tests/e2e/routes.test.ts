@@ -101,7 +101,7 @@ describe('each route, as the map says', () => {
       '/api/auth/providers',
       '/_image?href=/favicon.svg',
       '/_server-islands/x',
-      '/programme/people',
+      '/programme/nothing',
     ]) {
       expect((await call(path, { role: 'director' })).status, path).toBe(404);
     }

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import { actingAs } from '#src/schemas/actingAs.ts';
+import { PEOPLE_REQUESTS } from '#src/services/openapi/peopleRequests.ts';
 import { correctHandedness, nothing, setRestriction, settle } from '#src/schemas/settle.ts';
 
 /** What the description says of a route beside its path. */
@@ -59,6 +60,7 @@ export const REQUESTS: Readonly<Record<string, DescribedRequest>> = {
     form: true,
     answer: 'What was kept',
   },
+  ...PEOPLE_REQUESTS,
   'GET /api/method': { summary: 'The calculators', answer: 'Their names, titles and addresses' },
   'GET /api/openapi.json': { summary: 'This description', answer: 'OpenAPI 3.1' },
 };

@@ -84,6 +84,23 @@ async function makeAcademy(client: pg.Client, name: string): Promise<Academy> {
     rows_read: 1,
   });
   await insert('audit', { academy_id: id, action: 'add', subject: 'athlete' });
+  await insert('column_mapping', { academy_id: id, name: 'Ours', kind: 'driver', mapping: {} });
+  await insert('outbox', { academy_id: id, kind: 'outrun', person_id: swing, payload: {}, message_key: 'one' });
+  for (const person of [director, strength, swing, guardian, formerGuardian, ownAccount]) {
+    await insert('notice', {
+      academy_id: id,
+      person_id: person,
+      kind: 'a test',
+      text: 'Something happened',
+      link: '/',
+    });
+  }
+  const token = () => Buffer.from(randomUUID().replaceAll('-', ''), 'utf8');
+  await insert('token', {
+    ...{ academy_id: id, kind: 'invite', token_hash: token(), email: `new@${name}.example`.toLowerCase() },
+    ...{ role: 'swing_coach', expires_at: '2099-01-01' },
+  });
+  await insert('token', { kind: 'reset', token_hash: token(), person_id: swing, expires_at: '2099-01-01' });
   await client.query(`insert into attempt_limit (key, points) values ($1, 1)`, [name]);
 
   const athletes: string[] = [];
@@ -139,6 +156,10 @@ async function makeAcademy(client: pg.Client, name: string): Promise<Academy> {
       ...{ raised_on: '2026-02-03', level_since: '2026-02-03' },
     });
     await insert('outrun_event', { ...about, outrun_id: outrun, kind: 'raised', happened_on: '2026-02-03' });
+    await insert('outrun_tick', { ...about, outrun_id: outrun, statement: 'Warm', ticked_by: strength });
+    await insert('retest_request', { ...about, asked_by: swing });
+    await insert('notebook_entry', { ...about, id: randomUUID(), author_id: strength, body: 'note' });
+    await insert('testing_day_athlete', { ...about, testing_day_id: dayId });
     await insert('outrun_note', { ...about, outrun_id: outrun, author_id: strength, body: 'note' });
   }
   await insert('guardianship', { academy_id: id, athlete_id: athletes[0], person_id: guardian });

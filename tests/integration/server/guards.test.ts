@@ -9,7 +9,8 @@ beforeAll(async () => {
     reached.push(`${req.method} ${req.url}`);
     if (req.url === '/broken') throw new Error('secret of Amara');
     res.setHeader('Content-Type', 'application/json');
-    res.end(JSON.stringify({ forwarded: req.headers['x-forwarded-for'], requestId: locals['requestId'] }));
+    const { origin, 'x-forwarded-for': forwarded } = req.headers;
+    res.end(JSON.stringify({ forwarded, origin, requestId: locals['requestId'] }));
   });
 });
 afterAll(() => site.close());
@@ -83,6 +84,16 @@ describe('origin guard', () => {
     for (const foreign of ['http://evil.example', 'null', `http://127.0.0.1:${site.port + 1}`, undefined]) {
       expect(await send(foreign)).toMatch(/^HTTP\/1\.1 403 /);
     }
+  });
+
+  it('names as ours the form of a page that keeps its address to itself, if the browser vouches for it', async () => {
+    const send = (from: string) =>
+      site.raw(
+        `POST /invite HTTP/1.1\r\nHost: 127.0.0.1:${site.port}\r\nOrigin: null\r\nSec-Fetch-Site: ${from}\r\n` +
+          'Content-Type: application/x-www-form-urlencoded\r\nContent-Length: 0\r\nConnection: close\r\n\r\n',
+      );
+    expect(await send('same-origin')).toContain(`"origin":"${site.origin}"`);
+    for (const from of ['same-site', 'cross-site', 'none']) expect(await send(from)).toMatch(/^HTTP\/1\.1 403 /);
   });
 
   it.each(['OPTIONS', 'TRACE', 'PROPFIND'])('does not use %s', async (method) => {

@@ -15,6 +15,9 @@ const TABLE: Readonly<Partial<Record<Permission, string>>> = {
   'outrun:see': 'director strength_coach swing_coach',
   'restriction:set': 'director strength_coach swing_coach',
   'restriction:clear': 'director strength_coach',
+  'people:manage': 'director',
+  'programme:manage': 'director',
+  'child-sign-in:make': 'guardian',
 };
 
 describe('the permission map', () => {

@@ -6,7 +6,7 @@ import { placesFor } from '#src/layouts/navigation.ts';
 
 describe('the places in the header', () => {
   it.each([
-    ['director', ['Today', 'Squads', 'Asked values', 'Outruns', 'Method']],
+    ['director', ['Today', 'Squads', 'Asked values', 'Outruns', 'Programme', 'Method']],
     ['strength_coach', ['Today', 'Squads', 'Asked values', 'Outruns', 'Method']],
     ['swing_coach', ['Today', 'Squads', 'Outruns', 'Method']],
     ['guardian', ['Family', 'Method']],
