@@ -45,6 +45,14 @@ export const jobDb = () => open('DATABASE_JOB_URL', 3).db;
 /** Set-up of a new academy and the demo, from the command line only. */
 export const ownerDb = () => open('DATABASE_OWNER_URL', 2).db;
 
+/** A pool of the queue's own: whoever makes it ends it, and by that waits for what is still on its way. */
+export function makeQueuePool(connectionString: string): pg.Pool {
+  const pool = new pg.Pool({ connectionString, max: 4, connectionTimeoutMillis: 4_000 });
+  pool.on('error', () => undefined);
+  pool.on('connect', (client) => client.on('error', () => undefined));
+  return pool;
+}
+
 /** Closes every pool that this process opened. */
 export async function closeDatabases(): Promise<void> {
   await Promise.all([...opened.values()].map(({ db }) => db.destroy()));

@@ -1,5 +1,6 @@
 import { EventEmitter } from 'node:events';
 import { Logger, makeWorkerUtils, run, type Runner, type TaskList, type WorkerEvents } from 'graphile-worker';
+import { makeQueuePool } from '#src/db/client.ts';
 import { describeError, describeText } from '#src/server/describeError.ts';
 import type { Log } from '#src/server/log.ts';
 
@@ -23,10 +24,12 @@ export function startWorker(parts: WorkerParts): { stop: () => Promise<void> } {
     for (let waitMs = 1_000; !stopping; waitMs = Math.min(waitMs * 2, 30_000)) {
       try {
         await releaseLocks(parts);
-        runner = await runOnce(parts);
-        if (stopping) await runner.stop();
-        waitMs = 1_000;
-        await runner.promise;
+        await withQueuePool(parts, async (pool) => {
+          runner = await runOnce(parts, pool);
+          if (stopping) await runner.stop();
+          waitMs = 1_000;
+          await runner.promise;
+        });
       } catch (error) {
         parts.log.warn({ error: describeError(error) }, 'job queue is waiting for the database');
       }
@@ -60,20 +63,35 @@ async function releaseLocks({ connectionString, workerId, log }: WorkerParts): P
   }
 }
 
-function runOnce({ connectionString, tasks, workerId, log }: WorkerParts): Promise<Runner> {
+type QueuePool = ReturnType<typeof makeQueuePool>;
+
+// The library does not wait until a finished job is marked as done; ending a pool of our own does.
+async function withQueuePool(
+  { connectionString }: WorkerParts,
+  work: (pool: QueuePool) => Promise<void>,
+): Promise<void> {
+  const pool = makeQueuePool(connectionString);
+  try {
+    await work(pool);
+  } finally {
+    await pool.end();
+  }
+}
+
+function runOnce({ tasks, workerId, log }: WorkerParts, pgPool: QueuePool): Promise<Runner> {
   const events = new EventEmitter() as WorkerEvents;
   // The locks carry the pool's id, which is random and has no option: it is named here, before its first job.
   events.on('pool:create', ({ workerPool }) => {
     workerPool.id = workerId;
   });
   return run({
-    connectionString,
+    pgPool,
     taskList: tasks,
     events,
     concurrency: 1,
     noHandleSignals: true,
     logger: queueLogger(log),
-    preset: { worker: { gracefulShutdownAbortTimeout: 5_000, maxPoolSize: 4 } },
+    preset: { worker: { gracefulShutdownAbortTimeout: 5_000 } },
   });
 }
 
