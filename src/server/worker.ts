@@ -65,7 +65,8 @@ async function releaseLocks({ connectionString, workerId, log }: WorkerParts): P
 
 type QueuePool = ReturnType<typeof makeQueuePool>;
 
-// The library does not wait until a finished job is marked as done; ending a pool of our own does.
+// The library does not wait until a finished job is marked as done. A turn of the event loop lets that statement take its
+// connection, and ending a pool of our own waits until the connection is given back.
 async function withQueuePool(
   { connectionString }: WorkerParts,
   work: (pool: QueuePool) => Promise<void>,
@@ -74,6 +75,7 @@ async function withQueuePool(
   try {
     await work(pool);
   } finally {
+    await new Promise((resolve) => setImmediate(resolve));
     await pool.end();
   }
 }

@@ -40,6 +40,23 @@ it('runs a job under the name of its worker, and at a stop finishes it', async (
   expect(await query('select from graphile_worker.jobs')).toEqual([]);
 });
 
+it('marks as done the job that ends while the worker is stopping', async () => {
+  for (let i = 0; i < 10; i += 1) {
+    await query(`select graphile_worker.add_job('probe', '{"a":1}')`);
+    let stopped: Promise<void> | undefined;
+    let finished = () => {};
+    const ran = new Promise<void>((resolve) => (finished = resolve));
+    const worker = work(async () => {
+      stopped = worker.stop();
+      await query('select 1');
+      finished();
+    });
+    await ran;
+    await stopped;
+    expect(await query('select from graphile_worker.jobs')).toEqual([]);
+  }
+});
+
 it('takes up at once the job that a killed worker of its name held, and leaves that of another', async () => {
   await query(
     `select graphile_worker.add_job('probe', '{"of":"mine"}'), graphile_worker.add_job('probe', '{"of":"other"}')`,
